@@ -1,0 +1,24 @@
+package org.ductledger.flow;
+
+import java.util.List;
+import java.util.stream.Stream;
+import org.ductledger.catalogue.Catalogue;
+
+/** The table of contents. */
+public final class StandardCatalogue {
+    /** The library's version; a changed value of a function is a new one. */
+    public static final String VERSION = "1.0.0";
+
+    private static final Catalogue CATALOGUE = new Catalogue(
+            VERSION,
+            Stream.of(
+                    Isentropic.entries())
+                    .flatMap(List::stream)
+                    .toList());
+
+    private StandardCatalogue() {}
+
+    public static Catalogue get() {
+        return CATALOGUE;
+    }
+}
