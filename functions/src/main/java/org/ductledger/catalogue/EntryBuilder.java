@@ -8,30 +8,26 @@ import org.jspecify.annotations.Nullable;
 
 /** Gathers what an entry says, and refuses one that says too little. */
 public final class EntryBuilder {
-    final Family family;
-    final String name;
-    String title = "";
-    String formula = "";
-    String note = "";
-    List<Argument> arguments = List.of();
+    private final Family family;
+    private final String name;
+    private String title = "";
+    private String formula = "";
+    private String note = "";
+    private List<Argument> arguments = List.of();
 
-    @Nullable
-    Result result;
+    private @Nullable Result result;
 
-    @Nullable
-    Kernel kernel;
+    private @Nullable Kernel kernel;
 
-    final List<Condition> conditions = new ArrayList<>();
-    List<Sensitivity> sensitivities = List.of();
-    List<Source> sources = List.of();
+    private final List<Condition> conditions = new ArrayList<>();
+    private List<Sensitivity> sensitivities = List.of();
+    private List<Source> sources = List.of();
 
-    @Nullable
-    Example example;
+    private @Nullable Example example;
 
-    final List<Revision> revisions = new ArrayList<>();
+    private final List<Revision> revisions = new ArrayList<>();
 
-    @Nullable
-    CellForm cellForm;
+    private @Nullable CellForm cellForm;
 
     EntryBuilder(Family family, String name) {
         this.family = family;
@@ -187,7 +183,45 @@ public final class EntryBuilder {
         return this;
     }
 
+    /**
+     * The entry.
+     *
+     * @throws IllegalStateException if a part is missing, naming it
+     */
     public FunctionEntry build() {
-        return new FunctionEntry(this);
+        return new FunctionEntry(
+                name,
+                family,
+                title,
+                formula,
+                note,
+                arguments,
+                said(result, "a result"),
+                said(kernel, "a kernel"),
+                conditions,
+                eachSensitivity(),
+                sources,
+                said(example, "an example"),
+                revisions.isEmpty() ? List.of(new Revision(1, "first release")) : revisions,
+                said(cellForm, "a cell form"));
+    }
+
+    private <T> T said(@Nullable T part, String what) {
+        if (part == null) {
+            throw new IllegalStateException(name + " lacks " + what);
+        }
+        return part;
+    }
+
+    private List<Sensitivity> eachSensitivity() {
+        List<Sensitivity> each = new ArrayList<>();
+        for (int i = 0; i < arguments.size(); i++) {
+            if (arguments.get(i).isText()) {
+                each.add(new Sensitivity.None());
+            } else {
+                each.add(i < sensitivities.size() ? sensitivities.get(i) : new Sensitivity.Numeric());
+            }
+        }
+        return each;
     }
 }

@@ -1,108 +1,80 @@
 package org.ductledger.catalogue;
 
-import java.util.ArrayList;
 import java.util.List;
 import java.util.Set;
 import java.util.TreeSet;
-import org.jspecify.annotations.Nullable;
 
-/** Everything the catalogue knows of one function; help, page, errors, workbooks and tests are rendered from it. */
-public final class FunctionEntry {
-    private final String name;
-    private final Family family;
-    private final String title;
-    private final String formula;
-    private final String note;
-    private final List<Argument> arguments;
-    private final Result result;
-    private final Kernel kernel;
-    private final List<Condition> conditions;
-    private final List<Sensitivity> sensitivities;
-    private final List<Source> sources;
-    private final Example example;
-    private final List<Revision> revisions;
-    private final CellForm cellForm;
+/**
+ * Everything the catalogue knows of one function; help, page, errors, workbooks and tests are rendered from it.
+ *
+ * @param name lower snake case, by the grammar of the catalogue
+ * @param family the family it belongs to
+ * @param title one line
+ * @param formula the definition as one would write it on paper, in ASCII
+ * @param note what a user must know beside the formula; may be empty
+ * @param arguments in their order
+ * @param result its symbol, unit and range
+ * @param kernel the arithmetic, in coherent units
+ * @param conditions what the arguments must fulfil together
+ * @param sensitivities one for each argument, in their order
+ * @param sources where the definition comes from
+ * @param example an executable one
+ * @param revisions from the first to the current one
+ * @param cellForm how a plain spreadsheet computes it
+ */
+public record FunctionEntry(
+        String name,
+        Family family,
+        String title,
+        String formula,
+        String note,
+        List<Argument> arguments,
+        Result result,
+        Kernel kernel,
+        List<Condition> conditions,
+        List<Sensitivity> sensitivities,
+        List<Source> sources,
+        Example example,
+        List<Revision> revisions,
+        CellForm cellForm) {
+    private static final int LONGEST_NAME = 40;
 
-    FunctionEntry(EntryBuilder b) {
-        name = b.name;
-        family = b.family;
-        title = b.title;
-        formula = b.formula;
-        note = b.note;
-        arguments = b.arguments;
-        result = said(b.result, "a result");
-        kernel = said(b.kernel, "a kernel");
-        conditions = List.copyOf(b.conditions);
-        sensitivities = sensitivities(b);
-        sources = b.sources;
-        example = said(b.example, "an example");
-        revisions = b.revisions.isEmpty() ? List.of(new Revision(1, "first release")) : List.copyOf(b.revisions);
-        cellForm = said(b.cellForm, "a cell form");
-        check();
+    public FunctionEntry {
+        arguments = List.copyOf(arguments);
+        conditions = List.copyOf(conditions);
+        sensitivities = List.copyOf(sensitivities);
+        sources = List.copyOf(sources);
+        revisions = List.copyOf(revisions);
+        require(
+                name,
+                name.matches("[a-z][a-z0-9]*(_[a-z0-9]+)+") && name.length() <= LONGEST_NAME,
+                "a name by the grammar");
+        require(name, !title.isEmpty() && !formula.isEmpty(), "a title and a formula");
+        require(name, kernel.arity() == arguments.size(), "a kernel of " + arguments.size() + " arguments");
+        require(name, sensitivities.size() == arguments.size(), "a sensitivity for each argument");
+        require(name, !sources.isEmpty(), "a source");
+        require(name, !revisions.isEmpty(), "a revision");
+        require(name, example.arguments().size() == arguments.size(), "an example with every argument");
+        checkCellForm(name, arguments, cellForm);
     }
 
-    private <T> T said(@Nullable T part, String what) {
-        if (part == null) {
-            throw new IllegalStateException(name + " lacks " + what);
-        }
-        return part;
-    }
-
-    private static List<Sensitivity> sensitivities(EntryBuilder b) {
-        List<Sensitivity> list = new ArrayList<>();
-        for (int i = 0; i < b.arguments.size(); i++) {
-            list.add(
-                    b.arguments.get(i).isText()
-                            ? new Sensitivity.None()
-                            : i < b.sensitivities.size() ? b.sensitivities.get(i) : new Sensitivity.Numeric());
-        }
-        return List.copyOf(list);
-    }
-
-    private void check() {
-        require(name.matches("[a-z][a-z0-9]*(_[a-z0-9]+)+") && name.length() <= 40, "a name by the grammar");
-        require(!title.isEmpty() && !formula.isEmpty(), "a title and a formula");
-        require(kernel.arity() == arguments.size(), "a kernel of " + arguments.size() + " arguments");
-        require(!sources.isEmpty(), "a source");
-        require(example.arguments().size() == arguments.size(), "an example with every argument");
+    private static void checkCellForm(String name, List<Argument> arguments, CellForm form) {
         Set<String> known = new TreeSet<>();
         arguments.forEach(a -> known.add(a.name()));
-        for (CellForm.Helper helper : cellForm.helpers()) {
-            require(known.containsAll(CellForm.holes(helper.formula())), "names in its cell form's " + helper.name());
-            require(known.add(helper.name()), "a new name for helper " + helper.name());
+        for (CellForm.Helper helper : form.helpers()) {
+            require(
+                    name,
+                    known.containsAll(CellForm.holes(helper.formula())),
+                    "known names in its cell form's helper " + helper.name());
+            require(name, known.add(helper.name()), "a new name for its cell form's helper " + helper.name());
         }
-        require(known.containsAll(CellForm.holes(cellForm.formula())), "names in its cell form");
+        require(name, known.containsAll(CellForm.holes(form.formula())), "known names in its cell form");
     }
 
-    private void require(boolean held, String what) {
+    private static void require(String name, boolean held, String what) {
         if (!held) {
             throw new IllegalStateException(name + " lacks " + what);
         }
-    }
-
-    public String name() {
-        return name;
-    }
-
-    public Family family() {
-        return family;
-    }
-
-    public String title() {
-        return title;
-    }
-
-    public String formula() {
-        return formula;
-    }
-
-    /** What a user must know beside the formula; may be empty. */
-    public String note() {
-        return note;
-    }
-
-    public List<Argument> arguments() {
-        return arguments;
     }
 
     /** The place of an argument in the order of the entry, or -1. */
@@ -115,43 +87,9 @@ public final class FunctionEntry {
         return -1;
     }
 
-    public Result result() {
-        return result;
-    }
-
-    public Kernel kernel() {
-        return kernel;
-    }
-
-    public List<Condition> conditions() {
-        return conditions;
-    }
-
-    /** One for each argument, in their order. */
-    public List<Sensitivity> sensitivities() {
-        return sensitivities;
-    }
-
-    public List<Source> sources() {
-        return sources;
-    }
-
-    public Example example() {
-        return example;
-    }
-
-    /** From the first to the current one. */
-    public List<Revision> revisions() {
-        return revisions;
-    }
-
     /** The current revision's number. */
     public int revision() {
         return revisions.get(revisions.size() - 1).number();
-    }
-
-    public CellForm cellForm() {
-        return cellForm;
     }
 
     @Override
