@@ -12,8 +12,7 @@ import java.util.List;
  * @param interval the admissible values in that unit
  * @param choices the admissible words; empty for a number. A kernel sees a word as its place in this list
  */
-public record Argument(
-        String name, String symbol, String meaning, Unit unit, Interval interval, List<String> choices) {
+public record Argument(String name, String symbol, String meaning, Unit unit, Interval interval, List<String> choices) {
     public Argument {
         choices = List.copyOf(choices);
     }
@@ -23,8 +22,7 @@ public record Argument(
     }
 
     public static Argument choice(String name, String meaning, String... choices) {
-        return new Argument(
-                name, name, meaning, Unit.ONE, Interval.closed(0, choices.length - 1.0), List.of(choices));
+        return new Argument(name, name, meaning, Unit.ONE, Interval.closed(0, choices.length - 1.0), List.of(choices));
     }
 
     public boolean isText() {

@@ -114,8 +114,7 @@ public final class Kernel {
     public static Kernel of(Of6 f) {
         return new Kernel(6, (x, from, to, y) -> {
             for (int i = from; i < to; i++) {
-                y[i] = f.at(
-                        pick(x[0], i), pick(x[1], i), pick(x[2], i), pick(x[3], i), pick(x[4], i), pick(x[5], i));
+                y[i] = f.at(pick(x[0], i), pick(x[1], i), pick(x[2], i), pick(x[3], i), pick(x[4], i), pick(x[5], i));
             }
         });
     }

@@ -19,8 +19,7 @@ final class Arguments {
     static final Argument AREA = Argument.number("area", "A", "m2", Interval.above(0), "flow area");
     static final Argument AREA_RATIO = Argument.number(
             "area_ratio", "A/A*", "1", Interval.atLeast(1), "area over the area at which this flow is sonic");
-    static final Argument BRANCH =
-            Argument.choice("branch", "which of the two solutions", "subsonic", "supersonic");
+    static final Argument BRANCH = Argument.choice("branch", "which of the two solutions", "subsonic", "supersonic");
 
     /** The place of {@code subsonic} in {@link #BRANCH}. */
     static final double SUBSONIC = 0;

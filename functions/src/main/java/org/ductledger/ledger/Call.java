@@ -13,7 +13,11 @@ import org.jspecify.annotations.Nullable;
  * @param arguments by the arguments' names, in the order given
  * @param unit the unit wanted for the result, as typed; {@code null} means the function's own
  */
-public record Call(String id, String function, Map<String, Given> arguments, @Nullable String unit) {
+public record Call(
+        String id,
+        String function,
+        Map<String, Given> arguments,
+        @Nullable String unit) {
     public Call {
         arguments = Collections.unmodifiableMap(new LinkedHashMap<>(arguments));
     }

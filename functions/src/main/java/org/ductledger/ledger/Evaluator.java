@@ -68,8 +68,9 @@ public final class Evaluator {
         double[] result = new double[step.rows()];
         apply(step.entry().kernel(), arguments, result);
         faults.settle(arguments, result);
-        return new Evaluated(new Column.Numbers(result), new Outcome(
-                step.call().id(), step.entry(), step.unit(), shown(step, result), faults.list()));
+        return new Evaluated(
+                new Column.Numbers(result),
+                new Outcome(step.call().id(), step.entry(), step.unit(), shown(step, result), faults.list()));
     }
 
     private static Evaluated earlier(Plan.Input input, Map<String, Evaluated> done) {
@@ -107,8 +108,7 @@ public final class Evaluator {
         int blocks = (rows + BLOCK_ROWS - 1) / BLOCK_ROWS;
         IntStream.range(0, blocks)
                 .parallel()
-                .forEach(b -> kernel.apply(
-                        arguments, b * BLOCK_ROWS, Math.min(rows, (b + 1) * BLOCK_ROWS), result));
+                .forEach(b -> kernel.apply(arguments, b * BLOCK_ROWS, Math.min(rows, (b + 1) * BLOCK_ROWS), result));
     }
 
     private static Column shown(Plan.Step step, double[] result) {

@@ -10,4 +10,9 @@ import org.jspecify.annotations.Nullable;
  * @param given what was given for it, in the unit in which it was given: a {@code Double} or a {@code String}
  * @param detail what is required and what was given
  */
-public record Fault(int row, FaultKind kind, @Nullable String argument, @Nullable Object given, String detail) {}
+public record Fault(
+        int row,
+        FaultKind kind,
+        @Nullable String argument,
+        @Nullable Object given,
+        String detail) {}

@@ -69,7 +69,8 @@ final class Faults {
         Argument argument = step.inputs().get(place).argument();
         Unit unit = step.inputs().get(place).unit();
         boolean notANumber = given instanceof Double x && Double.isNaN(x);
-        String shown = given instanceof Double x ? Numbers.brief(x) + (unit.isOne() ? "" : " " + unit) : "'" + given + "'";
+        String shown =
+                given instanceof Double x ? Numbers.brief(x) + (unit.isOne() ? "" : " " + unit) : "'" + given + "'";
         return new Fault(
                 0,
                 notANumber ? FaultKind.NOT_A_NUMBER : FaultKind.OUTSIDE_DOMAIN,

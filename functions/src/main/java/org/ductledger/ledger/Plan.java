@@ -18,7 +18,11 @@ import org.jspecify.annotations.Nullable;
 /** Checks a ledger as a whole before anything is computed: names, units, references, lengths. */
 final class Plan {
     /** An argument as the evaluator takes it: given values with their unit, or an earlier step. */
-    record Input(Argument argument, Given.@Nullable Values values, Unit unit, @Nullable Step earlier) {}
+    record Input(
+            Argument argument,
+            Given.@Nullable Values values,
+            Unit unit,
+            @Nullable Step earlier) {}
 
     /** A call that is known to be sound. */
     record Step(Call call, FunctionEntry entry, List<Input> inputs, Unit unit, int rows, boolean spread) {}
@@ -133,8 +137,8 @@ final class Plan {
                     FaultKind.NOT_A_NUMBER,
                     place,
                     name,
-                    name + " must be " + (argument.isText() ? argument.requirement(Unit.ONE) : "a number")
-                            + ", got " + (argument.isText() ? "a number" : "text"));
+                    name + " must be " + (argument.isText() ? argument.requirement(Unit.ONE) : "a number") + ", got "
+                            + (argument.isText() ? "a number" : "text"));
             return null;
         }
         if (given.column().rows() == 0) {
@@ -164,8 +168,11 @@ final class Plan {
                     name,
                     what + " requires a unit of the kind of " + own + ", got " + symbol + reason);
         } catch (UnknownUnitException e) {
-            refuse(FaultKind.UNKNOWN_UNIT, place, name, what + " requires a unit of the kind of " + own + ": "
-                    + e.getMessage());
+            refuse(
+                    FaultKind.UNKNOWN_UNIT,
+                    place,
+                    name,
+                    what + " requires a unit of the kind of " + own + ": " + e.getMessage());
         }
         return null;
     }
@@ -220,7 +227,8 @@ final class Plan {
         }
         if (lengths.size() > 1) {
             StringBuilder detail = new StringBuilder("columns of one call must have the same number of rows, got ");
-            lengths.forEach((rows, name) -> detail.append(name).append(" with ").append(rows).append(", "));
+            lengths.forEach((rows, name) ->
+                    detail.append(name).append(" with ").append(rows).append(", "));
             detail.setLength(detail.length() - 2);
             refuse(FaultKind.BAD_REFERENCE, place, null, detail.toString());
         }
