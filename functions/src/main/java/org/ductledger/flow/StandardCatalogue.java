@@ -10,7 +10,12 @@ public final class StandardCatalogue {
     public static final String VERSION = "1.0.0";
 
     private static final Catalogue CATALOGUE = new Catalogue(
-            VERSION, Stream.of(Isentropic.entries()).flatMap(List::stream).toList());
+            VERSION,
+            Stream.of(
+                            Isentropic.entries(), //
+                            Fan.entries())
+                    .flatMap(List::stream)
+                    .toList());
 
     private StandardCatalogue() {}
 
