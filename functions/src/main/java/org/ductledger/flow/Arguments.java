@@ -19,10 +19,20 @@ final class Arguments {
     static final Argument AREA = Argument.number("area", "A", "m2", Interval.above(0), "flow area");
     static final Argument AREA_RATIO = Argument.number(
             "area_ratio", "A/A*", "1", Interval.atLeast(1), "area over the area at which this flow is sonic");
+    static final Argument THROAT_AREA =
+            Argument.number("throat_area", "At", "m2", Interval.above(0), "flow area at the throat");
+    static final Argument EXIT_AREA_RATIO =
+            Argument.number("exit_area_ratio", "Ae/At", "1", Interval.atLeast(1), "exit area over the throat area");
+    static final Argument STATION_AREA_RATIO = AREA_RATIO.named("area_ratio", "A/At", "area over the throat area");
+    static final Argument STATION_SIDE =
+            Argument.choice("station_side", "side of the throat on which the station lies", "converging", "diverging");
     static final Argument BRANCH = Argument.choice("branch", "which of the two solutions", "subsonic", "supersonic");
 
     /** The place of {@code subsonic} in {@link #BRANCH}. */
     static final double SUBSONIC = 0;
+
+    /** The place of {@code converging} in {@link #STATION_SIDE}. */
+    static final double CONVERGING = 0;
 
     private Arguments() {}
 }

@@ -3,23 +3,29 @@ package org.ductledger.flow;
 import java.util.List;
 import java.util.stream.Stream;
 import org.ductledger.catalogue.Catalogue;
+import org.ductledger.catalogue.FunctionEntry;
 
 /** The table of contents. */
 public final class StandardCatalogue {
     /** The library's version; a changed value of a function is a new one. */
     public static final String VERSION = "1.0.0";
 
-    private static final Catalogue CATALOGUE = new Catalogue(
-            VERSION,
-            Stream.of(
-                            Isentropic.entries(), //
-                            Fan.entries())
-                    .flatMap(List::stream)
-                    .toList());
+    private static final Catalogue CATALOGUE =
+            new Catalogue(VERSION, families().flatMap(List::stream).toList());
 
     private StandardCatalogue() {}
 
     public static Catalogue get() {
         return CATALOGUE;
     }
+
+    // spotless:off
+    private static Stream<List<FunctionEntry>> families() {
+        return Stream.of(
+                Isentropic.entries(),
+                Fan.entries(),
+                Contour.entries(),
+                Conversions.entries());
+    }
+    // spotless:on
 }
