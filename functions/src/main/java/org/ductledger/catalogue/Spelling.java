@@ -5,12 +5,13 @@ import java.util.Comparator;
 import java.util.List;
 
 /** Guesses what a mistyped name may have meant. */
-final class Spelling {
+public final class Spelling {
     private static final int LONGEST_COMPARED = 60;
 
     private Spelling() {}
 
-    static List<String> near(String given, Collection<String> names, int most) {
+    /** The names within about a third of the letters, the nearest first, at most so many. */
+    public static List<String> near(String given, Collection<String> names, int most) {
         if (given.length() > LONGEST_COMPARED) {
             return List.of();
         }

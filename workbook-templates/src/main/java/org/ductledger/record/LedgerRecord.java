@@ -1,0 +1,97 @@
+package org.ductledger.record;
+
+import java.util.ArrayList;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import org.ductledger.ledger.Call;
+import org.ductledger.ledger.Column;
+import org.ductledger.ledger.Given;
+import org.ductledger.ledger.Ledger;
+import org.ductledger.ledger.Reference;
+import org.ductledger.record.RecordedArgument.FromCall;
+import org.ductledger.record.RecordedArgument.FromQuantity;
+
+/**
+ * The machine-readable record of a workbook, as its {@code Ledger} sheet holds it.
+ *
+ * @param template the template's name
+ * @param templateVersion the template's version
+ * @param library the library's version at the fill
+ * @param units the unit system, {@code si} or {@code us}
+ * @param quantities what the calls take that no call gives
+ * @param calls in their order
+ * @param digest as the sheet holds it; {@link RecordDigest#of} says what it ought to be
+ */
+public record LedgerRecord(
+        String template,
+        int templateVersion,
+        String library,
+        String units,
+        List<RecordedQuantity> quantities,
+        List<RecordedCall> calls,
+        String digest) {
+    public LedgerRecord {
+        quantities = List.copyOf(quantities);
+        calls = List.copyOf(calls);
+    }
+
+    /** The same record under another digest. */
+    public LedgerRecord withDigest(String other) {
+        return new LedgerRecord(template, templateVersion, library, units, quantities, calls, other);
+    }
+
+    /**
+     * The ledger that the record stands for, ready to be evaluated again.
+     *
+     * @throws IllegalArgumentException if an argument names a quantity that the record does not have
+     */
+    public Ledger ledger() {
+        return new Ledger(calls.stream().map(this::call).toList(), List.of());
+    }
+
+    /**
+     * The quantity of that name.
+     *
+     * @throws IllegalArgumentException if there is none
+     */
+    public RecordedQuantity quantity(String name) {
+        return quantities.stream()
+                .filter(quantity -> quantity.name().equals(name))
+                .findFirst()
+                .orElseThrow(() -> new IllegalArgumentException("no quantity is named " + name));
+    }
+
+    private Call call(RecordedCall recorded) {
+        Map<String, Given> arguments = new LinkedHashMap<>();
+        for (RecordedArgument argument : recorded.arguments()) {
+            arguments.put(argument.name(), given(argument.origin()));
+        }
+        String unit = recorded.unit().isEmpty() ? null : recorded.unit();
+        return new Call(recorded.id(), recorded.function(), arguments, unit);
+    }
+
+    private Given given(RecordedArgument.Origin origin) {
+        if (origin instanceof FromCall call) {
+            return new Reference(call.id());
+        }
+        FromQuantity from = (FromQuantity) origin;
+        RecordedQuantity quantity = quantity(from.quantity());
+        Column column = rows(quantity.values(), from.rows());
+        String unit = quantity.unit().isEmpty() ? null : quantity.unit();
+        return new Given.Values(column, column.rows() == 1, unit);
+    }
+
+    private static Column rows(Column column, List<Integer> rows) {
+        if (rows.isEmpty()) {
+            return column;
+        }
+        if (column instanceof Column.Numbers numbers) {
+            return new Column.Numbers(
+                    rows.stream().mapToDouble(row -> numbers.values()[row]).toArray());
+        }
+        List<String> words = new ArrayList<>();
+        rows.forEach(row -> words.add(((Column.Texts) column).values().get(row)));
+        return new Column.Texts(List.copyOf(words));
+    }
+}
