@@ -24,6 +24,8 @@ public final class StandardCatalogue {
         return Stream.of(
                 Isentropic.entries(),
                 Fan.entries(),
+                Atmosphere.entries(),
+                Gases.entries(),
                 Contour.entries(),
                 Conversions.entries());
     }
