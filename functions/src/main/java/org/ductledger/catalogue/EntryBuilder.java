@@ -186,9 +186,12 @@ public final class EntryBuilder {
     /**
      * The entry.
      *
-     * @throws IllegalStateException if a part is missing, naming it
+     * @throws IllegalStateException if a part is missing or does not fit the others, naming it
      */
     public FunctionEntry build() {
+        if (!sensitivities.isEmpty() && sensitivities.size() != arguments.size()) {
+            throw new IllegalStateException(name + " lacks a partial, or null, for each argument");
+        }
         return new FunctionEntry(
                 name,
                 family,
@@ -219,7 +222,7 @@ public final class EntryBuilder {
             if (arguments.get(i).isText()) {
                 each.add(new Sensitivity.None());
             } else {
-                each.add(i < sensitivities.size() ? sensitivities.get(i) : new Sensitivity.Numeric());
+                each.add(sensitivities.isEmpty() ? new Sensitivity.Numeric() : sensitivities.get(i));
             }
         }
         return each;

@@ -53,14 +53,37 @@ public record FunctionEntry(
         require(name, kernel.arity() == arguments.size(), "a kernel of " + arguments.size() + " arguments");
         require(name, sensitivities.size() == arguments.size(), "a sensitivity for each argument");
         require(name, !sources.isEmpty(), "a source");
+        Set<String> names = new TreeSet<>();
+        arguments.forEach(argument -> names.add(argument.name()));
+        require(name, names.size() == arguments.size(), "a name of its own for each argument");
         require(name, !revisions.isEmpty(), "a revision");
-        require(name, example.arguments().size() == arguments.size(), "an example with every argument");
-        checkCellForm(name, arguments, cellForm);
+        for (int i = 0; i < revisions.size(); i++) {
+            require(name, revisions.get(i).number() == i + 1, "revisions that count up from 1");
+        }
+        conditions.forEach(condition ->
+                require(name, names.contains(condition.argument()), "the argument " + condition.argument()));
+        sensitivities.forEach(s -> require(
+                name,
+                !(s instanceof Sensitivity.Exact exact) || exact.derivative().arity() == names.size(),
+                "a partial of " + names.size() + " arguments"));
+        checkExample(name, arguments, example);
+        checkCellForm(name, names, cellForm);
     }
 
-    private static void checkCellForm(String name, List<Argument> arguments, CellForm form) {
-        Set<String> known = new TreeSet<>();
-        arguments.forEach(a -> known.add(a.name()));
+    private static void checkExample(String name, List<Argument> arguments, Example example) {
+        require(name, example.arguments().size() == arguments.size(), "an example with every argument");
+        for (int i = 0; i < arguments.size(); i++) {
+            Argument argument = arguments.get(i);
+            Object given = example.arguments().get(i);
+            boolean fits = argument.isText()
+                    ? argument.choices().contains(given)
+                    : given instanceof Double x && argument.interval().contains(x);
+            require(name, fits, "an example with an admissible " + argument.name());
+        }
+    }
+
+    private static void checkCellForm(String name, Set<String> arguments, CellForm form) {
+        Set<String> known = new TreeSet<>(arguments);
         for (CellForm.Helper helper : form.helpers()) {
             require(
                     name,
@@ -85,6 +108,24 @@ public record FunctionEntry(
             }
         }
         return -1;
+    }
+
+    /**
+     * The partial derivative with respect to one argument, in coherent units: exact where the entry keeps it, else by
+     * differences.
+     *
+     * @param argument the argument's place
+     * @param row the arguments in order, each in its interval
+     * @throws IllegalArgumentException if the argument is a word, or the function gives one
+     */
+    public double partial(int argument, double... row) {
+        Argument by = arguments.get(argument);
+        if (by.isText() || result.isText()) {
+            throw new IllegalArgumentException(name + " has no derivative by " + by.name() + ": words do not vary");
+        }
+        return sensitivities.get(argument) instanceof Sensitivity.Exact exact
+                ? exact.derivative().at(row)
+                : new Differences(kernel, argument, row).within(by.interval());
     }
 
     /** The current revision's number. */

@@ -6,6 +6,12 @@ public record Interval(double lower, boolean lowerTaken, double upper, boolean u
         if (!(lower <= upper)) {
             throw new IllegalArgumentException("lower end " + lower + " must not exceed upper end " + upper);
         }
+        if ((lowerTaken && Double.isInfinite(lower)) || (upperTaken && Double.isInfinite(upper))) {
+            throw new IllegalArgumentException("an infinite end is never taken: no value is infinite");
+        }
+        if ((lowerTaken ? lower : Math.nextUp(lower)) > (upperTaken ? upper : Math.nextDown(upper))) {
+            throw new IllegalArgumentException("no number lies between " + lower + " and " + upper);
+        }
     }
 
     public static Interval closed(double lower, double upper) {

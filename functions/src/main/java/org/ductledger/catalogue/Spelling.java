@@ -3,6 +3,7 @@ package org.ductledger.catalogue;
 import java.util.Collection;
 import java.util.Comparator;
 import java.util.List;
+import java.util.Locale;
 
 /** Guesses what a mistyped name may have meant. */
 public final class Spelling {
@@ -10,16 +11,23 @@ public final class Spelling {
 
     private Spelling() {}
 
-    /** The names within about a third of the letters, the nearest first, at most so many. */
+    /**
+     * The names within about a third of the given letters, the nearest first, at most so many; the case of letters
+     * counts last.
+     */
     public static List<String> near(String given, Collection<String> names, int most) {
         if (given.length() > LONGEST_COMPARED) {
             return List.of();
         }
-        int allowed = Math.max(2, given.length() / 3);
+        int allowed = (given.length() + 1) / 3;
+        String plain = given.toLowerCase(Locale.ROOT);
+        record Near(String name, int distance, int exact) {}
         return names.stream()
-                .filter(name -> distance(given, name) <= allowed)
-                .sorted(Comparator.comparingInt(name -> distance(given, name)))
+                .map(name -> new Near(name, distance(plain, name.toLowerCase(Locale.ROOT)), distance(given, name)))
+                .filter(near -> near.distance <= allowed)
+                .sorted(Comparator.comparingInt(Near::distance).thenComparingInt(Near::exact))
                 .limit(most)
+                .map(Near::name)
                 .toList();
     }
 

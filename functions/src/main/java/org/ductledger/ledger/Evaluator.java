@@ -5,6 +5,7 @@ import java.util.Arrays;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Set;
 import java.util.stream.IntStream;
 import org.ductledger.catalogue.Catalogue;
 import org.ductledger.catalogue.Kernel;
@@ -35,63 +36,60 @@ public final class Evaluator {
      * @throws LedgerRefusedException if the ledger as a whole is unsound: a name, a unit, a reference or a length
      */
     public List<Outcome> evaluate(Ledger ledger) throws LedgerRefusedException {
-        Map<String, Evaluated> done = new HashMap<>();
+        Map<String, double[]> done = new HashMap<>();
         List<Outcome> wanted = new ArrayList<>();
+        Set<String> want = Set.copyOf(ledger.want());
         for (Plan.Step step : Plan.of(ledger, catalogue)) {
-            Evaluated evaluated = evaluate(step, done);
-            done.put(step.call().id(), evaluated);
-            if (ledger.want().isEmpty() || ledger.want().contains(step.call().id())) {
-                wanted.add(evaluated.outcome());
+            Faults faults = new Faults(step);
+            double[] result = evaluate(step, done, faults);
+            done.put(step.call().id(), result);
+            if (want.isEmpty() || want.contains(step.call().id())) {
+                Column shown = shown(step, result, faults);
+                wanted.add(new Outcome(step.call().id(), step.entry(), step.unit(), shown, faults.list()));
             }
         }
         return wanted;
     }
 
-    /** A result in coherent units, as later calls take it, and its outcome. */
-    private record Evaluated(Column.Numbers coherent, Outcome outcome) {}
-
-    private static Evaluated evaluate(Plan.Step step, Map<String, Evaluated> done) {
-        Faults faults = new Faults(step);
+    /** The result in coherent units, as later calls take it; NaN in the rows with a fault. */
+    private static double[] evaluate(Plan.Step step, Map<String, double[]> done, Faults faults) {
         double[][] arguments = new double[step.inputs().size()][];
         for (int i = 0; i < arguments.length; i++) {
-            Plan.Input input = step.inputs().get(i);
-            Given.Values values = input.values();
-            if (values != null) {
-                arguments[i] = coherent(values.column(), input);
-                faults.checkGiven(i, arguments[i], values.column());
-            } else {
-                Evaluated earlier = earlier(input, done);
-                arguments[i] = earlier.coherent().values();
-                faults.checkReferred(i, arguments[i], earlier.outcome());
-            }
+            arguments[i] = coherent(step.inputs().get(i), done);
+            faults.check(i, arguments[i]);
         }
         double[] result = new double[step.rows()];
-        apply(step.entry().kernel(), arguments, result);
-        faults.settle(arguments, result);
-        return new Evaluated(
-                new Column.Numbers(result),
-                new Outcome(step.call().id(), step.entry(), step.unit(), shown(step, result), faults.list()));
-    }
-
-    private static Evaluated earlier(Plan.Input input, Map<String, Evaluated> done) {
-        Plan.Step step = input.earlier();
-        Evaluated evaluated = step == null ? null : done.get(step.call().id());
-        if (evaluated == null) {
-            throw new IllegalStateException("the plan let a reference through that has no result");
+        if (faults.isEmpty()) {
+            apply(step.entry().kernel(), arguments, result);
+        } else {
+            applyTo(faults.soundRows(), step.entry().kernel(), arguments, result);
         }
-        return evaluated;
+        faults.settle(arguments, result);
+        return result;
     }
 
-    private static double[] coherent(Column column, Plan.Input input) {
-        if (column instanceof Column.Texts texts) {
+    private static double[] coherent(Plan.Input input, Map<String, double[]> done) {
+        Given.Values values = input.values();
+        if (values == null) {
+            return earlier(input.earlier(), done);
+        }
+        if (values.column() instanceof Column.Texts texts) {
             return texts.values().stream()
                     .mapToDouble(word -> place(word, input.argument().choices()))
                     .toArray();
         }
-        double[] values = ((Column.Numbers) column).values();
+        double[] given = ((Column.Numbers) values.column()).values();
         return input.unit().isCoherent()
-                ? values
-                : Arrays.stream(values).map(input.unit()::toCoherent).toArray();
+                ? given
+                : Arrays.stream(given).map(input.unit()::toCoherent).toArray();
+    }
+
+    private static double[] earlier(Plan.@Nullable Step step, Map<String, double[]> done) {
+        double[] result = step == null ? null : done.get(step.call().id());
+        if (result == null) {
+            throw new IllegalStateException("the plan let a reference through that has no result");
+        }
+        return result;
     }
 
     private static double place(@Nullable String word, List<String> choices) {
@@ -111,18 +109,48 @@ public final class Evaluator {
                 .forEach(b -> kernel.apply(arguments, b * BLOCK_ROWS, Math.min(rows, (b + 1) * BLOCK_ROWS), result));
     }
 
-    private static Column shown(Plan.Step step, double[] result) {
-        if (step.entry().result().isText()) {
-            List<String> choices = step.entry().result().choices();
-            List<@Nullable String> words = new ArrayList<>(result.length);
-            for (double place : result) {
-                words.add(Double.isNaN(place) ? null : choices.get((int) place));
-            }
-            return new Column.Texts(words);
+    /** Computes some rows only: a kernel is never asked outside its domain. The others become NaN. */
+    private static void applyTo(int[] rows, Kernel kernel, double[][] arguments, double[] result) {
+        Arrays.fill(result, Double.NaN);
+        if (rows.length == 0) {
+            return;
         }
-        return new Column.Numbers(
-                step.unit().isCoherent()
-                        ? result
-                        : Arrays.stream(result).map(step.unit()::fromCoherent).toArray());
+        double[][] some = new double[arguments.length][];
+        for (int i = 0; i < some.length; i++) {
+            double[] all = arguments[i];
+            some[i] = all.length == 1
+                    ? all
+                    : Arrays.stream(rows).mapToDouble(row -> all[row]).toArray();
+        }
+        double[] computed = new double[rows.length];
+        apply(kernel, some, computed);
+        for (int i = 0; i < rows.length; i++) {
+            result[rows[i]] = computed[i];
+        }
+    }
+
+    private static Column shown(Plan.Step step, double[] result, Faults faults) {
+        if (step.entry().result().isText()) {
+            return words(step.entry().result().choices(), result);
+        }
+        if (step.unit().isCoherent()) {
+            return new Column.Numbers(result);
+        }
+        double[] shown = Arrays.stream(result).map(step.unit()::fromCoherent).toArray();
+        for (int i = 0; i < shown.length; i++) {
+            if (Double.isInfinite(shown[i])) {
+                faults.addBeyondDouble(i);
+                shown[i] = Double.NaN;
+            }
+        }
+        return new Column.Numbers(shown);
+    }
+
+    private static Column.Texts words(List<String> choices, double[] places) {
+        List<@Nullable String> words = new ArrayList<>(places.length);
+        for (double place : places) {
+            words.add(Double.isNaN(place) ? null : choices.get((int) place));
+        }
+        return new Column.Texts(words);
     }
 }

@@ -1,8 +1,9 @@
 package org.ductledger.ledger;
 
 import java.util.ArrayList;
+import java.util.BitSet;
+import java.util.Comparator;
 import java.util.List;
-import java.util.TreeMap;
 import org.ductledger.catalogue.Argument;
 import org.ductledger.catalogue.Condition;
 import org.ductledger.catalogue.FaultKind;
@@ -13,87 +14,108 @@ import org.jspecify.annotations.Nullable;
 /** Gathers the faults of one call's rows: the first one found for a row stays. */
 final class Faults {
     private final Plan.Step step;
-    private final TreeMap<Integer, Fault> byRow = new TreeMap<>();
+    private final BitSet faulty = new BitSet();
+    private final List<Fault> found = new ArrayList<>();
 
     Faults(Plan.Step step) {
         this.step = step;
     }
 
-    List<Fault> list() {
-        return new ArrayList<>(byRow.values());
+    boolean isEmpty() {
+        return found.isEmpty();
     }
 
-    /** Checks an argument's own values against its interval, in accepting form, so that NaN never passes. */
-    void checkGiven(int place, double[] coherent, Column asGiven) {
+    /** The faults in the order of their rows. */
+    List<Fault> list() {
+        found.sort(Comparator.comparingInt(Fault::row));
+        return List.copyOf(found);
+    }
+
+    /** The rows without a fault, in order. */
+    int[] soundRows() {
+        int[] rows = new int[step.rows() - faulty.cardinality()];
+        int row = -1;
+        for (int i = 0; i < rows.length; i++) {
+            row = faulty.nextClearBit(row + 1);
+            rows[i] = row;
+        }
+        return rows;
+    }
+
+    /** Checks an argument's column against its interval, in accepting form, so that NaN never passes. */
+    void check(int place, double[] coherent) {
         Argument argument = step.inputs().get(place).argument();
         double least = argument.interval().least();
         double greatest = argument.interval().greatest();
         for (int i = 0; i < coherent.length; i++) {
             if (!(coherent[i] >= least && coherent[i] <= greatest)) {
-                blame(coherent, i, outside(place, given(asGiven, i)));
+                blame(coherent, i, outside(place, coherent[i], i));
             }
         }
     }
 
-    /** Checks what an earlier call gave: a row without a value, or a value outside this argument's interval. */
-    void checkReferred(int place, double[] coherent, Outcome earlier) {
-        Argument argument = step.inputs().get(place).argument();
-        double least = argument.interval().least();
-        double greatest = argument.interval().greatest();
-        for (int i = 0; i < coherent.length; i++) {
-            if (Double.isNaN(coherent[i])) {
-                blame(coherent, i, withoutValue(argument, earlier, i));
-            } else if (!(coherent[i] >= least && coherent[i] <= greatest)) {
-                blame(coherent, i, outside(place, (Object) coherent[i]));
-            }
+    private Fault outside(int place, double coherent, int row) {
+        Plan.Input input = step.inputs().get(place);
+        Plan.Step earlier = input.earlier();
+        String name = input.argument().name();
+        if (earlier != null && Double.isNaN(coherent)) {
+            String id = earlier.call().id();
+            String detail = name + " refers to " + id + ", which has no value in this row";
+            return new Fault(row, FaultKind.BAD_REFERENCE, name, id, detail);
         }
-    }
-
-    private static Fault withoutValue(Argument argument, Outcome earlier, int row) {
+        Object given = given(input, coherent, row);
+        boolean notANumber = given instanceof Double x && Double.isNaN(x);
         return new Fault(
                 row,
-                FaultKind.BAD_REFERENCE,
-                argument.name(),
-                earlier.id(),
-                argument.name() + " refers to " + earlier.id() + ", which has no value in this row");
-    }
-
-    private static @Nullable Object given(Column column, int row) {
-        if (column instanceof Column.Texts texts) {
-            return texts.values().get(row);
-        }
-        return ((Column.Numbers) column).values()[row];
-    }
-
-    private Fault outside(int place, @Nullable Object given) {
-        Argument argument = step.inputs().get(place).argument();
-        Unit unit = step.inputs().get(place).unit();
-        boolean notANumber = given instanceof Double x && Double.isNaN(x);
-        String shown =
-                given instanceof Double x ? Numbers.brief(x) + (unit.isOne() ? "" : " " + unit) : "'" + given + "'";
-        return new Fault(
-                0,
                 notANumber ? FaultKind.NOT_A_NUMBER : FaultKind.OUTSIDE_DOMAIN,
-                argument.name(),
+                name,
                 notANumber ? null : given,
-                argument.name() + " must be " + argument.requirement(unit) + ", got " + shown);
+                name + " must be " + input.argument().requirement(input.unit()) + ", got " + shown(input, given));
+    }
+
+    /** What stands in the ledger for this row, as it was given; a referred value in its coherent unit. */
+    private static @Nullable Object given(Plan.Input input, double coherent, int row) {
+        Given.Values values = input.values();
+        if (values != null) {
+            int own = values.column().rows() == 1 ? 0 : row;
+            return values.column() instanceof Column.Texts texts
+                    ? texts.values().get(own)
+                    : (Object) ((Column.Numbers) values.column()).values()[own];
+        }
+        return input.argument().isText() ? input.argument().choices().get((int) coherent) : (Object) coherent;
+    }
+
+    private static String shown(Plan.Input input, @Nullable Object given) {
+        String text = given instanceof Double x ? Numbers.brief(x) + suffix(input.unit()) : "'" + given + "'";
+        Plan.Step earlier = input.earlier();
+        return earlier == null ? text : text + " from " + earlier.call().id();
+    }
+
+    private static String suffix(Unit unit) {
+        return unit.isOne() ? "" : " " + unit;
     }
 
     /** Puts a fault on a row, or on every row where a single value is spread. */
     private void blame(double[] column, int row, Fault fault) {
-        boolean spread = column.length == 1 && step.rows() > 1;
-        int last = spread ? step.rows() - 1 : row;
-        for (int i = spread ? 0 : row; i <= last; i++) {
-            byRow.putIfAbsent(i, new Fault(i, fault.kind(), fault.argument(), fault.given(), fault.detail()));
+        boolean spread = column.length == 1;
+        int end = spread ? step.rows() : row + 1;
+        for (int i = spread ? 0 : row; i < end; i++) {
+            add(new Fault(i, fault.kind(), fault.argument(), fault.given(), fault.detail()));
         }
     }
 
-    /** Clears the rows that have a fault, and finds the reason for every result that is no finite number. */
+    private void add(Fault fault) {
+        if (!faulty.get(fault.row())) {
+            faulty.set(fault.row());
+            found.add(fault);
+        }
+    }
+
+    /** Finds the reason for every result of a sound row that is no finite number, and clears it. */
     void settle(double[][] arguments, double[] result) {
-        byRow.keySet().forEach(row -> result[row] = Double.NaN);
         for (int i = 0; i < result.length; i++) {
-            if (!Double.isFinite(result[i]) && !byRow.containsKey(i)) {
-                byRow.put(i, explain(i, row(arguments, i), result[i]));
+            if (!Double.isFinite(result[i]) && !faulty.get(i)) {
+                add(explain(i, row(arguments, i), result[i]));
                 result[i] = Double.NaN;
             }
         }
@@ -114,38 +136,37 @@ final class Faults {
             }
         }
         if (Double.isNaN(result)) {
-            return new Fault(
-                    row,
-                    FaultKind.NOT_CONVERGED,
-                    null,
-                    null,
-                    step.entry().name() + " did not reach its accuracy for these arguments");
+            String detail = step.entry().name() + " did not reach its accuracy for these arguments";
+            return new Fault(row, FaultKind.NOT_CONVERGED, null, null, detail);
         }
-        return new Fault(
-                row,
-                FaultKind.OUTSIDE_DOMAIN,
-                null,
-                null,
-                step.entry().name() + " must stay within the range of a double (about 1.8e308), and is larger here");
+        return beyondDouble(row, step.entry().result().unit());
     }
 
     private Fault broken(int row, Condition condition, double[] arguments) {
         int place = step.entry().place(condition.argument());
         Plan.Input input = step.inputs().get(place);
-        Argument argument = input.argument();
-        double coherent = arguments[place];
-        Unit own = argument.unit();
-        Object given = argument.isText()
-                ? argument.choices().get((int) coherent)
-                : (Object) input.unit().fromCoherent(coherent);
-        String shown = argument.isText()
-                ? argument.choices().get((int) coherent)
-                : Numbers.brief(coherent) + (own.isOne() ? "" : " " + own);
+        Object given = given(input, arguments[place], row);
+        String inCoherent = input.unit().isCoherent()
+                ? ""
+                : " = " + Numbers.brief(arguments[place])
+                        + suffix(input.argument().unit());
         return new Fault(
                 row,
                 condition.kind(),
-                argument.name(),
+                condition.argument(),
                 given,
-                argument.name() + " " + condition.wording().of(arguments) + ", got " + shown);
+                condition.argument() + " " + condition.wording().of(arguments) + ", got " + shown(input, given)
+                        + inCoherent);
+    }
+
+    /** A result that is finite in its coherent unit but not in the unit wanted. */
+    void addBeyondDouble(int row) {
+        add(beyondDouble(row, step.unit()));
+    }
+
+    private Fault beyondDouble(int row, Unit unit) {
+        String detail = step.entry().name() + " must stay within the range of a double (about 1.8e308)"
+                + (unit.isOne() ? "" : " in " + unit) + ", and is larger here";
+        return new Fault(row, FaultKind.OUTSIDE_DOMAIN, null, null, detail);
     }
 }

@@ -12,7 +12,6 @@ import org.ductledger.catalogue.Catalogue;
 import org.ductledger.catalogue.FaultKind;
 import org.ductledger.catalogue.FunctionEntry;
 import org.ductledger.catalogue.Unit;
-import org.ductledger.catalogue.UnknownUnitException;
 import org.jspecify.annotations.Nullable;
 
 /** Checks a ledger as a whole before anything is computed: names, units, references, lengths. */
@@ -24,12 +23,12 @@ final class Plan {
             Unit unit,
             @Nullable Step earlier) {}
 
-    /** A call that is known to be sound. */
+    /** A call that is known to be sound; it is spread where every argument is a single value. */
     record Step(Call call, FunctionEntry entry, List<Input> inputs, Unit unit, int rows, boolean spread) {}
 
     private final Catalogue catalogue;
     private final List<Refusal> refusals = new ArrayList<>();
-    /** The sound calls so far; an unsound one maps to null, so that what leans on it is not blamed again. */
+    /** The calls so far; an unsound one maps to null, so that what leans on it is not blamed again. */
     private final Map<String, @Nullable Step> byId = new HashMap<>();
 
     private final Set<String> allIds = new HashSet<>();
@@ -48,7 +47,7 @@ final class Plan {
         for (int i = 0; i < ledger.calls().size(); i++) {
             Call call = ledger.calls().get(i);
             if (byId.containsKey(call.id())) {
-                refuse(FaultKind.BAD_REFERENCE, i, null, "the id " + call.id() + " is given to two calls");
+                refuse(FaultKind.BAD_REFERENCE, i, "the id " + call.id() + " is given to two calls");
                 continue;
             }
             Step step = step(call, i);
@@ -59,7 +58,7 @@ final class Plan {
         }
         for (String id : ledger.want()) {
             if (!allIds.contains(id)) {
-                refuse(FaultKind.BAD_REFERENCE, -1, null, "want names " + id + ", but no call has that id");
+                refuse(FaultKind.BAD_REFERENCE, -1, "want names " + id + ", but no call has that id");
             }
         }
         if (!refusals.isEmpty()) {
@@ -68,149 +67,50 @@ final class Plan {
         return steps;
     }
 
-    private void refuse(FaultKind kind, int call, @Nullable String argument, String detail) {
-        refusals.add(new Refusal(kind, call, argument, detail));
+    private void refuse(FaultKind kind, int call, String detail) {
+        refusals.add(new Refusal(kind, call, null, detail));
     }
 
     private @Nullable Step step(Call call, int place) {
         FunctionEntry entry = catalogue.find(call.function()).orElse(null);
         if (entry == null) {
             List<String> near = catalogue.near(call.function());
-            refuse(
-                    FaultKind.UNKNOWN_FUNCTION,
-                    place,
-                    null,
-                    "no function is named " + call.function()
-                            + (near.isEmpty() ? "" : "; near it: " + String.join(", ", near)));
+            String hint = near.isEmpty() ? "" : "; near it: " + String.join(", ", near);
+            refuse(FaultKind.UNKNOWN_FUNCTION, place, "no function is named " + call.function() + hint);
             return null;
         }
         int before = refusals.size();
-        for (String name : call.arguments().keySet()) {
-            if (entry.place(name) < 0) {
-                refuse(
-                        FaultKind.MISSING_ARGUMENT,
-                        place,
-                        name,
-                        entry.name() + " takes no argument " + name + "; it takes " + names(entry));
-            }
-        }
+        CallCheck check = new CallCheck(call, place, entry, refusals);
+        check.refuseUnknownArguments();
         List<Input> inputs = new ArrayList<>();
         for (Argument argument : entry.arguments()) {
-            Input input = input(call, place, entry, argument);
+            Input input = input(call, argument, check);
             if (input != null) {
                 inputs.add(input);
             }
         }
-        Unit unit = resultUnit(call, place, entry);
+        Unit unit = check.resultUnit();
         int rows = rows(place, inputs);
         if (refusals.size() > before || inputs.size() < entry.arguments().size() || unit == null) {
             return null;
         }
-        return new Step(call, entry, inputs, unit, Math.max(rows, 1), rows < 0);
+        return new Step(call, entry, List.copyOf(inputs), unit, Math.max(rows, 1), rows < 0);
     }
 
-    private static String names(FunctionEntry entry) {
-        return String.join(", ", entry.arguments().stream().map(Argument::name).toList());
-    }
-
-    private @Nullable Input input(Call call, int place, FunctionEntry entry, Argument argument) {
+    private @Nullable Input input(Call call, Argument argument, CallCheck check) {
         Given given = call.arguments().get(argument.name());
         if (given == null) {
-            refuse(
-                    FaultKind.MISSING_ARGUMENT,
-                    place,
-                    argument.name(),
-                    entry.name() + " requires " + argument.name() + ", " + argument.requirement(argument.unit())
-                            + (argument.isText() ? "" : " in " + argument.unit()) + ", and it is not given");
-            return null;
+            return check.missing(argument);
         }
-        if (given instanceof Reference reference) {
-            return reference(reference, place, argument);
+        if (given instanceof Given.Values values) {
+            return check.values(values, argument);
         }
-        return values((Given.Values) given, place, argument);
-    }
-
-    private @Nullable Input values(Given.Values given, int place, Argument argument) {
-        String name = argument.name();
-        if (argument.isText() != given.column() instanceof Column.Texts) {
-            refuse(
-                    FaultKind.NOT_A_NUMBER,
-                    place,
-                    name,
-                    name + " must be " + (argument.isText() ? argument.requirement(Unit.ONE) : "a number") + ", got "
-                            + (argument.isText() ? "a number" : "text"));
-            return null;
+        String id = ((Reference) given).id();
+        if (!byId.containsKey(id)) {
+            return check.noEarlierCall(id, argument, allIds.contains(id));
         }
-        if (given.column().rows() == 0) {
-            refuse(FaultKind.MISSING_ARGUMENT, place, name, name + " has no rows; at least one is required");
-            return null;
-        }
-        Unit unit = unitFor(given.unit(), argument.unit(), place, name);
-        return unit == null ? null : new Input(argument, given, unit, null);
-    }
-
-    private @Nullable Unit unitFor(@Nullable String symbol, Unit own, int place, @Nullable String name) {
-        if (symbol == null) {
-            return own;
-        }
-        String what = name == null ? "the result" : name;
-        try {
-            Unit unit = Unit.named(symbol);
-            if (unit.measuresSameKindAs(own)) {
-                return unit;
-            }
-            String reason = own.symbol().equals("K") && unit.coherent().symbol().equals("delta_K")
-                    ? "; a temperature difference is not a temperature"
-                    : "";
-            refuse(
-                    FaultKind.UNKNOWN_UNIT,
-                    place,
-                    name,
-                    what + " requires a unit of the kind of " + own + ", got " + symbol + reason);
-        } catch (UnknownUnitException e) {
-            refuse(
-                    FaultKind.UNKNOWN_UNIT,
-                    place,
-                    name,
-                    what + " requires a unit of the kind of " + own + ": " + e.getMessage());
-        }
-        return null;
-    }
-
-    private @Nullable Input reference(Reference reference, int place, Argument argument) {
-        String name = argument.name();
-        if (!byId.containsKey(reference.id())) {
-            String reason = allIds.contains(reference.id())
-                    ? name + " refers to " + reference.id() + ", which is not an earlier call: a ledger is"
-                            + " evaluated in its order, so that no call can lean on itself or a later one"
-                    : name + " refers to " + reference.id() + ", but no call has that id";
-            refuse(FaultKind.BAD_REFERENCE, place, name, reason);
-            return null;
-        }
-        Step earlier = byId.get(reference.id());
-        if (earlier == null) {
-            return null;
-        }
-        Unit gives = earlier.entry().result().unit();
-        boolean text = earlier.entry().result().isText();
-        if (text != argument.isText() || !gives.measuresSameKindAs(argument.unit())) {
-            refuse(
-                    FaultKind.BAD_REFERENCE,
-                    place,
-                    name,
-                    name + " requires " + (argument.isText() ? "a word" : "a value in " + argument.unit()) + ", but "
-                            + reference.id() + " gives " + (text ? "a word" : "a value in " + gives));
-            return null;
-        }
-        return new Input(argument, null, argument.unit(), earlier);
-    }
-
-    private @Nullable Unit resultUnit(Call call, int place, FunctionEntry entry) {
-        if (call.unit() != null && entry.result().isText()) {
-            refuse(FaultKind.UNKNOWN_UNIT, place, null, call.id() + " gives a word, which has no unit");
-            return null;
-        }
-        return unitFor(call.unit(), entry.result().unit(), place, null);
+        Step earlier = byId.get(id);
+        return earlier == null ? null : check.reference(earlier, argument);
     }
 
     /** The common number of rows; -1 where every argument is a single value. */
@@ -226,11 +126,12 @@ final class Plan {
             }
         }
         if (lengths.size() > 1) {
-            StringBuilder detail = new StringBuilder("columns of one call must have the same number of rows, got ");
-            lengths.forEach((rows, name) ->
-                    detail.append(name).append(" with ").append(rows).append(", "));
-            detail.setLength(detail.length() - 2);
-            refuse(FaultKind.BAD_REFERENCE, place, null, detail.toString());
+            List<String> each = new ArrayList<>();
+            lengths.forEach((rows, name) -> each.add(name + " with " + rows));
+            refuse(
+                    FaultKind.BAD_REFERENCE,
+                    place,
+                    "columns of one call must have the same number of rows, got " + String.join(", ", each));
         }
         return lengths.isEmpty() ? -1 : lengths.keySet().iterator().next();
     }
