@@ -1,6 +1,7 @@
 package org.ductledger.record;
 
 import java.util.ArrayList;
+import java.util.Comparator;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
@@ -11,6 +12,7 @@ import org.ductledger.ledger.Ledger;
 import org.ductledger.ledger.Reference;
 import org.ductledger.record.RecordedArgument.FromCall;
 import org.ductledger.record.RecordedArgument.FromQuantity;
+import org.ductledger.record.RecordedQuantity.Role;
 
 /**
  * The machine-readable record of a workbook, as its {@code Ledger} sheet holds it.
@@ -19,7 +21,7 @@ import org.ductledger.record.RecordedArgument.FromQuantity;
  * @param templateVersion the template's version
  * @param library the library's version at the fill
  * @param units the unit system, {@code si} or {@code us}
- * @param quantities what the calls take that no call gives
+ * @param quantities what the calls take that no call gives; inputs and remarks stand before the template's constants
  * @param calls in their order
  * @param digest as the sheet holds it; {@link RecordDigest#of} says what it ought to be
  */
@@ -32,7 +34,9 @@ public record LedgerRecord(
         List<RecordedCall> calls,
         String digest) {
     public LedgerRecord {
-        quantities = List.copyOf(quantities);
+        quantities = quantities.stream()
+                .sorted(Comparator.comparing(quantity -> quantity.role() == Role.FIXED))
+                .toList();
         calls = List.copyOf(calls);
     }
 
