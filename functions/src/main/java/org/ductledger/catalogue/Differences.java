@@ -33,6 +33,11 @@ final class Differences {
         return best;
     }
 
+    /** How far the estimates that led to the last answer lie apart; infinite before there is one. */
+    double error() {
+        return leastError;
+    }
+
     /** Halves the step level by level and keeps the estimate on which its neighbours agree best. */
     private void extrapolate(double firstStep, boolean central) {
         double[][] table = new double[LEVELS][LEVELS];
