@@ -52,8 +52,9 @@ final class Fan {
         double nu = angle / DEGREES;
         double c = (gamma - 1) / (gamma + 1);
         double p = StrictMath.cbrt(1.5 * (gamma + 1) * nu);
-        double greatest = StrictMath.cbrt(1.5 * (gamma + 1) * nu / z);
-        double pole = (1 / c - 1) * z / (nu * greatest);
+        double reach = prandtlMeyerAngleMax(gamma) / DEGREES;
+        double greatest = StrictMath.cbrt(1.5 * (gamma + 1) * reach);
+        double pole = (1 / c - 1) / (reach * greatest);
         double beta = (pole - (1 + c) * greatest * greatest / 5) / (greatest * greatest * greatest * greatest);
         double y = nu == 0 ? 0 : p * (1 - z + p * p * ((1 + c) / 5 + beta * p * p)) / (1 - z);
         for (int i = 0; i < 4 && y > 0; i++) {

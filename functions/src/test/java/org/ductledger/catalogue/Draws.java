@@ -2,7 +2,7 @@ package org.ductledger.catalogue;
 
 import java.util.List;
 import java.util.Map;
-import java.util.SplittableRandom;
+import java.util.Random;
 
 /** Draws admissible arguments for any entry, the same ones in every run. */
 final class Draws {
@@ -21,11 +21,12 @@ final class Draws {
     private static final Interval ORDINARY_GAMMA = Interval.closed(1.02, 1.7);
 
     private final FunctionEntry entry;
-    private final SplittableRandom random;
+    private final Random random;
 
     Draws(FunctionEntry entry) {
         this.entry = entry;
-        random = new SplittableRandom(entry.name().hashCode());
+        // unlike the newer generators, this one is specified to the bit
+        random = new Random(entry.name().hashCode());
     }
 
     /** The example's arguments as a kernel takes them. */
@@ -41,16 +42,26 @@ final class Draws {
 
     /** Arguments of a size met in practice: half of them about the example, half over a few decades. */
     double[] ordinary() {
-        double[] row = example(entry);
-        boolean nearExample = random.nextBoolean();
+        double[] row = wide();
+        if (random.nextBoolean()) {
+            double[] example = example(entry);
+            for (int i = 0; i < row.length; i++) {
+                Argument argument = entry.arguments().get(i);
+                double near = example[i] * (0.8 + 0.4 * random.nextDouble());
+                row[i] = argument.isText() ? row[i] : clamp(near, argument.interval());
+            }
+        }
+        return row;
+    }
+
+    /** Arguments of a size met in practice, each over a few decades; the example has no part in them. */
+    double[] wide() {
+        double[] row = new double[entry.arguments().size()];
         for (int i = 0; i < row.length; i++) {
             Argument argument = entry.arguments().get(i);
-            if (argument.isText()) {
-                row[i] = random.nextInt(argument.choices().size());
-            } else {
-                double drawn = nearExample ? row[i] * (0.8 + 0.4 * random.nextDouble()) : ordinary(argument);
-                row[i] = clamp(drawn, argument.interval());
-            }
+            row[i] = argument.isText()
+                    ? random.nextInt(argument.choices().size())
+                    : clamp(ordinary(argument), argument.interval());
         }
         return row;
     }
@@ -68,7 +79,7 @@ final class Draws {
 
     /** Arguments from anywhere in their intervals, ends and the last doubles before them included. */
     double[] extreme() {
-        double[] row = ordinary();
+        double[] row = wide();
         for (int i = 0; i < row.length; i++) {
             Argument argument = entry.arguments().get(i);
             if (!argument.isText() && random.nextBoolean()) {
@@ -79,14 +90,14 @@ final class Draws {
     }
 
     private double extreme(Interval interval) {
-        double size = Math.scalb(1 + random.nextDouble(), random.nextInt(-1074, 1024));
+        double size = Math.scalb(1 + random.nextDouble(), random.nextInt(2098) - 1074);
         return switch (random.nextInt(7)) {
             case 0 -> interval.least();
             case 1 -> interval.greatest();
             case 2 -> Math.nextUp(interval.least());
             case 3 -> Math.nextDown(interval.greatest());
-            case 4 -> interval.lower() + Math.scalb(1 + random.nextDouble(), random.nextInt(-60, 8));
-            case 5 -> interval.upper() - Math.scalb(1 + random.nextDouble(), random.nextInt(-60, 8));
+            case 4 -> interval.lower() + Math.scalb(1 + random.nextDouble(), random.nextInt(68) - 60);
+            case 5 -> interval.upper() - Math.scalb(1 + random.nextDouble(), random.nextInt(68) - 60);
             default -> random.nextBoolean() ? size : -size;
         };
     }
