@@ -26,6 +26,7 @@ public final class StandardCatalogue {
                 Fan.entries(),
                 Atmosphere.entries(),
                 Gases.entries(),
+                Vessel.entries(),
                 Contour.entries(),
                 Conversions.entries());
     }
