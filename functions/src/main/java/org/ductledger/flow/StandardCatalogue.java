@@ -27,6 +27,7 @@ public final class StandardCatalogue {
                 Atmosphere.entries(),
                 Gases.entries(),
                 Vessel.entries(),
+                FlowMeter.entries(),
                 Contour.entries(),
                 Conversions.entries());
     }
