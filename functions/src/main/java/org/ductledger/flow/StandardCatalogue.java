@@ -23,6 +23,7 @@ public final class StandardCatalogue {
     private static Stream<List<FunctionEntry>> families() {
         return Stream.of(
                 Isentropic.entries(),
+                FlowRates.entries(),
                 Fan.entries(),
                 Atmosphere.entries(),
                 Gases.entries(),
