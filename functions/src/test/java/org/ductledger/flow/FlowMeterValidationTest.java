@@ -5,6 +5,7 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import java.util.Map;
 import java.util.SplittableRandom;
+import org.ductledger.exact.FortyDigits;
 import org.ductledger.flow.PublishedTable.Answer;
 import org.ductledger.flow.PublishedTable.Row;
 import org.hipparchus.dfp.Dfp;

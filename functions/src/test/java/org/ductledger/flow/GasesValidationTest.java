@@ -12,6 +12,7 @@ import java.util.Map;
 import java.util.Objects;
 import java.util.regex.Matcher;
 import java.util.regex.Pattern;
+import org.ductledger.exact.FortyDigits;
 import org.ductledger.flow.PublishedTable.Answer;
 import org.ductledger.flow.PublishedTable.Row;
 import org.junit.jupiter.api.Test;

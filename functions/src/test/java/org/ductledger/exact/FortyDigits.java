@@ -1,4 +1,4 @@
-package org.ductledger.flow;
+package org.ductledger.exact;
 
 import java.util.function.UnaryOperator;
 import org.hipparchus.dfp.Dfp;
@@ -6,7 +6,7 @@ import org.hipparchus.dfp.DfpField;
 import org.hipparchus.dfp.DfpMath;
 
 /** Arithmetic to more than 40 digits (Hipparchus Dfp), in which tests evaluate published equations. */
-final class FortyDigits {
+public final class FortyDigits {
     private static final DfpField FIELD = new DfpField(64);
 
     private static final double RULE_DENSITY = 8;
@@ -15,30 +15,30 @@ final class FortyDigits {
     private FortyDigits() {}
 
     /** Exactly this double. */
-    static Dfp of(double x) {
+    public static Dfp of(double x) {
         return FIELD.newDfp(x);
     }
 
     /** The decimal number as written, to all its digits. */
-    static Dfp decimal(String digits) {
+    public static Dfp decimal(String digits) {
         return FIELD.newDfp(digits);
     }
 
-    static Dfp exp(Dfp x) {
+    public static Dfp exp(Dfp x) {
         return DfpMath.exp(x);
     }
 
-    static Dfp log(Dfp x) {
+    public static Dfp log(Dfp x) {
         return DfpMath.log(x);
     }
 
     /** x to the power y, x &gt; 0. */
-    static Dfp pow(Dfp x, Dfp y) {
+    public static Dfp pow(Dfp x, Dfp y) {
         return x.equals(x.getOne()) ? x : exp(log(x).multiply(y));
     }
 
     /** The integral of a function without a singularity in between, by Takahasi and Mori's tanh-sinh rule. */
-    static Dfp integral(UnaryOperator<Dfp> f, Dfp from, Dfp to) {
+    public static Dfp integral(UnaryOperator<Dfp> f, Dfp from, Dfp to) {
         Dfp half = to.subtract(from).divide(2);
         Dfp sum = FIELD.getZero();
         Dfp quarterTurn = FIELD.getPi().divide(2);
@@ -56,8 +56,11 @@ final class FortyDigits {
         return sum.multiply(half).divide(of(RULE_DENSITY));
     }
 
-    /** How far a double is from the exact value, in units in the last place of that value. */
-    static double ulps(double got, Dfp exact) {
+    /** How far a double is from the exact value, in units in the last place of that value; infinite for no finite one. */
+    public static double ulps(double got, Dfp exact) {
+        if (!Double.isFinite(got)) {
+            return Double.POSITIVE_INFINITY;
+        }
         double nearest = exact.toDouble();
         return of(got).subtract(exact).divide(of(Math.ulp(nearest))).abs().toDouble();
     }
