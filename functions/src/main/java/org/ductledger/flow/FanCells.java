@@ -31,7 +31,11 @@ final class FanCells {
                 .use(
                         "mach2",
                         MACH_FROM_ANGLE,
-                        Map.of("prandtl_meyer_angle", "MAX(0,{nu1}+{turn})", "gamma", "{gamma}"));
+                        Map.of(
+                                "prandtl_meyer_angle",
+                                "IF({nu1}+{turn}<-1E-9,NA(),MAX(0,{nu1}+{turn}))",
+                                "gamma",
+                                "{gamma}"));
     }
 
     /** Below p = 0.001 the seed is right to the last digits that the angle has, and no step is taken. */
