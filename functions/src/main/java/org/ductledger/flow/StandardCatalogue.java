@@ -24,6 +24,7 @@ public final class StandardCatalogue {
         return Stream.of(
                 Isentropic.entries(),
                 FlowRates.entries(),
+                NormalShock.entries(),
                 Fan.entries(),
                 Atmosphere.entries(),
                 Gases.entries(),

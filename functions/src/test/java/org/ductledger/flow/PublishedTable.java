@@ -42,7 +42,8 @@ final class PublishedTable {
     }
 
     /**
-     * Checks the rows that the answerer gives a value for, each within its tolerance.
+     * Checks the rows that the answerer gives a value for, each within its tolerance; a value just half way to the next
+     * printed one passes.
      *
      * @return how many rows were checked, and how many were not for each reason
      */
@@ -51,7 +52,8 @@ final class PublishedTable {
         for (Row row : rows) {
             Answer answer = answerer.apply(row);
             if (answer.reason().isEmpty()) {
-                assertEquals(row.expected(), answer.value(), row.tolerance(), row::toString);
+                double halfWay = Math.ulp(row.expected());
+                assertEquals(row.expected(), answer.value(), row.tolerance() + halfWay, row::toString);
             }
             counts.merge(answer.reason().isEmpty() ? "checked" : answer.reason(), 1, Integer::sum);
         }
