@@ -22,7 +22,9 @@ public final class StandardCatalogue {
     // spotless:off
     private static Stream<List<FunctionEntry>> families() {
         return Stream.of(
-                Isentropic.entries(),
+                IsentropicRatios.entries(),
+                IsentropicInverses.entries(),
+                AreaRule.entries(),
                 FlowRates.entries(),
                 NormalShock.entries(),
                 Fan.entries(),

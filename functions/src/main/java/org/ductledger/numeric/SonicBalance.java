@@ -29,14 +29,23 @@ public final class SonicBalance {
     private SonicBalance() {}
 
     /**
-     * The solution below 1 or above it: to the last digits where {@link #isNear} holds of it, else to about six.
+     * The solution below 1 or above it, as well as the logarithms have it: to the last digits near M = 1.
      *
-     * @param k the right-hand side
+     * @param k the right-hand side, finite
      * @param c between 0 and 1
      * @param d 1 - c
      * @return M; infinity beyond the range of a double; NaN for a K below 0
      */
     public static double solve(double k, double c, double d, boolean above) {
+        return iterated(k, c, d, above, LAST_STEP);
+    }
+
+    /** The solution, to the last digits where {@link #isNear} holds of it, else to about six for a refinement. */
+    public static double approached(double k, double c, double d, boolean above) {
+        return iterated(k, c, d, above, LAST_STEP_BEFORE_REFINEMENT);
+    }
+
+    private static double iterated(double k, double c, double d, boolean above, double lastFarStep) {
         if (!(k > 0)) {
             return k == 0 ? 1 : Double.NaN;
         }
@@ -48,14 +57,14 @@ public final class SonicBalance {
         for (int i = 0; i < MOST_STEPS; i++) {
             double step = step(mach, residual(mach, k, c, d), c, d);
             mach = moved(mach, step);
-            if (Math.abs(step) < (isNear(mach) ? LAST_STEP : LAST_STEP_BEFORE_REFINEMENT)) {
+            if (Math.abs(step) < (isNear(mach) ? LAST_STEP : lastFarStep)) {
                 return mach;
             }
         }
         return Double.NaN;
     }
 
-    /** Whether {@link #solve} gave all digits. */
+    /** Whether {@link #approached} gave all digits. */
     public static boolean isNear(double mach) {
         return mach > NEAR_LEAST && mach < NEAR_MOST;
     }

@@ -1,0 +1,104 @@
+package org.ductledger.exact;
+
+import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertTrue;
+
+import java.io.IOException;
+import java.net.URISyntaxException;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.util.Comparator;
+import java.util.List;
+import java.util.Locale;
+import java.util.Objects;
+import java.util.Set;
+import java.util.TreeSet;
+import java.util.stream.Stream;
+import org.ductledger.exact.ExactGrid.Comparison;
+import org.junit.jupiter.api.Test;
+import org.junit.jupiter.api.TestReporter;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.MethodSource;
+
+/**
+ * Functions of the catalogue against exact values, near-sonic, tiny, huge and limiting arguments included. Source: the
+ * definition in the last column of each file, evaluated for exact doubles to 25 digits and more outside this program.
+ */
+class ExactGridValidationTest {
+    /** An error is allowed this many times what the last place of the input and of the result are worth. */
+    private static final double MOST = 4;
+
+    private static final double MOST_RMS = 1;
+
+    /** A row for each file; a new one is covered by a row here. */
+    // spotless:off
+    static Stream<ExactGrid> grids() {
+        return Stream.of(
+                ExactGrid.of("t_over_t0.csv", "t_over_t0", "mach"),
+                ExactGrid.of("p_over_p0.csv", "p_over_p0", "mach"),
+                ExactGrid.of("rho_over_rho0.csv", "rho_over_rho0", "mach"),
+                ExactGrid.of("v_over_astar.csv", "v_over_astar", "mach"),
+                ExactGrid.of("area_ratio.csv", "area_ratio", "mach"),
+                ExactGrid.of("q_over_p0.csv", "q_over_p0", "mach"),
+                ExactGrid.of("p0_over_p_minus_1.csv", "impact_pressure_over_p", "mach"),
+                ExactGrid.of("mass_flow_parameter.csv", "mass_flow_number", "mach"),
+                ExactGrid.of("mach_angle_rad.csv", "mach_angle", "mach").givingRadians(),
+                ExactGrid.of("inv_mach_from_t_over_t0.csv", "mach_from_t_over_t0", "t_over_t0"),
+                ExactGrid.of("inv_mach_from_p_over_p0.csv", "mach_from_p_over_p0", "p_over_p0"),
+                ExactGrid.of("inv_mach_from_rho_over_rho0.csv", "mach_from_rho_over_rho0", "rho_over_rho0"),
+                ExactGrid.of("inv_mach_from_v_over_astar.csv", "mach_from_v_over_astar", "v_over_astar"),
+                ExactGrid.of("inv_mach_from_area_ratio_subsonic.csv", "mach_from_area_ratio", "area_ratio")
+                        .with("branch", "subsonic"),
+                ExactGrid.of("inv_mach_from_area_ratio_supersonic.csv", "mach_from_area_ratio", "area_ratio")
+                        .with("branch", "supersonic"),
+                ExactGrid.of("inv_mach_from_mass_flow_parameter_subsonic.csv", "mach_from_mass_flow_number", "mass_flow_number")
+                        .with("branch", "subsonic"),
+                ExactGrid.of("inv_mach_from_mass_flow_parameter_supersonic.csv", "mach_from_mass_flow_number", "mass_flow_number")
+                        .with("branch", "supersonic"));
+    }
+    // spotless:on
+
+    @ParameterizedTest(name = "{0}")
+    @MethodSource("grids")
+    void staysWithinTheConditionOfTheFunction(ExactGrid grid, TestReporter reporter) {
+        List<Comparison> all = grid.compare();
+        assertTrue(all.size() > 100, () -> grid + " has " + all.size() + " rows");
+        Comparison worst = all.stream()
+                .max(Comparator.comparingDouble(Comparison::relativeToCondition))
+                .orElseThrow();
+        double rms = rootMeanSquare(all);
+        reporter.publishEntry(
+                grid.toString(),
+                String.format(
+                        Locale.ROOT,
+                        "max %.3f, rms %.3f x (1 + condition) ulp; worst %s",
+                        worst.relativeToCondition(),
+                        rms,
+                        worst));
+        assertTrue(worst.relativeToCondition() <= MOST, () -> grid + ": " + worst);
+        assertTrue(rms <= MOST_RMS, () -> grid + ": rms " + rms);
+    }
+
+    private static double rootMeanSquare(List<Comparison> all) {
+        double sum = 0;
+        for (Comparison comparison : all) {
+            sum += comparison.relativeToCondition() * comparison.relativeToCondition();
+        }
+        return Math.sqrt(sum / all.size());
+    }
+
+    @Test
+    void everyFileHasARow() throws IOException, URISyntaxException {
+        Path one = Path.of(Objects.requireNonNull(ExactGrid.class.getResource("/exact/area_ratio.csv"))
+                .toURI());
+        Set<String> files = new TreeSet<>();
+        try (Stream<Path> found = Files.list(Objects.requireNonNull(one.getParent()))) {
+            found.map(file -> String.valueOf(file.getFileName()))
+                    .filter(name -> name.endsWith(".csv"))
+                    .forEach(files::add);
+        }
+        Set<String> rows = new TreeSet<>();
+        grids().map(ExactGrid::file).forEach(rows::add);
+        assertEquals(files, rows);
+    }
+}
