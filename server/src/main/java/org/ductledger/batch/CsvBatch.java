@@ -1,6 +1,5 @@
 package org.ductledger.batch;
 
-import com.fasterxml.jackson.core.io.NumberOutput;
 import de.siegmar.fastcsv.writer.CsvWriter;
 import java.io.IOException;
 import java.io.OutputStream;
@@ -117,7 +116,9 @@ public final class CsvBatch {
         for (int i = 0; i < table.rows().size(); i++) {
             Fault fault = faults.get(i);
             writer.writeRecord(row(
-                    table.rows().get(i), fault == null ? value(outcome, i) : "", fault == null ? "" : detail(fault)));
+                    table.rows().get(i),
+                    fault == null ? Results.text(outcome, i) : "",
+                    fault == null ? "" : detail(fault)));
         }
         writer.flush();
     }
@@ -128,12 +129,6 @@ public final class CsvBatch {
         row.add(value);
         row.add(fault);
         return row;
-    }
-
-    private static String value(Outcome outcome, int row) {
-        return outcome.values() instanceof Column.Texts texts
-                ? String.valueOf(texts.values().get(row))
-                : NumberOutput.toString(outcome.numbers()[row], true);
     }
 
     /** A field that is no number reached the evaluator as NaN; its fault shows the field itself. */

@@ -2,7 +2,6 @@ package org.ductledger.batch;
 
 import com.fasterxml.jackson.core.JsonGenerator;
 import java.io.IOException;
-import java.io.OutputStream;
 import java.util.List;
 import org.ductledger.catalogue.Argument;
 import org.ductledger.catalogue.Catalogue;
@@ -20,9 +19,9 @@ import org.ductledger.catalogue.Unit;
 public final class EntryWriter {
     private EntryWriter() {}
 
-    /** Writes {@code {"library": ..., "functions": [...]}}, in the order of the families. */
-    public static void writeAll(Catalogue catalogue, OutputStream out) throws IOException {
-        try (JsonGenerator json = JsonDocuments.WRITING.createGenerator(out)) {
+    /** The document {@code {"library": ..., "functions": [...]}}, in the order of the families. */
+    public static byte[] all(Catalogue catalogue) {
+        return Json.bytes(json -> {
             json.writeStartObject();
             json.writeStringField("library", catalogue.version());
             json.writeArrayFieldStart("functions");
@@ -31,13 +30,11 @@ public final class EntryWriter {
             }
             json.writeEndArray();
             json.writeEndObject();
-        }
+        });
     }
 
-    public static void write(FunctionEntry entry, OutputStream out) throws IOException {
-        try (JsonGenerator json = JsonDocuments.WRITING.createGenerator(out)) {
-            write(entry, json);
-        }
+    public static byte[] one(FunctionEntry entry) {
+        return Json.bytes(json -> write(entry, json));
     }
 
     private static void write(FunctionEntry entry, JsonGenerator json) throws IOException {

@@ -20,17 +20,18 @@ public final class ResultsWriter {
      * @param out stays open
      */
     public static void write(String library, List<Outcome> outcomes, OutputStream out) throws IOException {
-        try (JsonGenerator json = JsonDocuments.WRITING.createGenerator(out)) {
-            json.disable(JsonGenerator.Feature.AUTO_CLOSE_TARGET);
-            json.writeStartObject();
-            json.writeStringField("library", library);
-            json.writeArrayFieldStart("results");
-            for (Outcome outcome : outcomes) {
-                write(outcome, json);
-            }
-            json.writeEndArray();
-            json.writeEndObject();
-        }
+        Json.write(
+                json -> {
+                    json.writeStartObject();
+                    json.writeStringField("library", library);
+                    json.writeArrayFieldStart("results");
+                    for (Outcome outcome : outcomes) {
+                        write(outcome, json);
+                    }
+                    json.writeEndArray();
+                    json.writeEndObject();
+                },
+                out);
     }
 
     private static void write(Outcome outcome, JsonGenerator json) throws IOException {

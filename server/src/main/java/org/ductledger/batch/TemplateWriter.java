@@ -2,7 +2,6 @@ package org.ductledger.batch;
 
 import com.fasterxml.jackson.core.JsonGenerator;
 import java.io.IOException;
-import java.io.OutputStream;
 import java.util.List;
 import java.util.Locale;
 import org.ductledger.ledger.Column;
@@ -15,9 +14,9 @@ import org.ductledger.template.UnitSystem;
 public final class TemplateWriter {
     private TemplateWriter() {}
 
-    /** Writes {@code {"library": ..., "templates": [...]}}. */
-    public static void writeAll(String library, List<Template> templates, OutputStream out) throws IOException {
-        try (JsonGenerator json = JsonDocuments.WRITING.createGenerator(out)) {
+    /** The document {@code {"library": ..., "templates": [...]}}. */
+    public static byte[] all(String library, List<Template> templates) {
+        return Json.bytes(json -> {
             json.writeStartObject();
             json.writeStringField("library", library);
             json.writeArrayFieldStart("templates");
@@ -26,13 +25,11 @@ public final class TemplateWriter {
             }
             json.writeEndArray();
             json.writeEndObject();
-        }
+        });
     }
 
-    public static void write(Template template, OutputStream out) throws IOException {
-        try (JsonGenerator json = JsonDocuments.WRITING.createGenerator(out)) {
-            write(template, json);
-        }
+    public static byte[] one(Template template) {
+        return Json.bytes(json -> write(template, json));
     }
 
     private static void write(Template template, JsonGenerator json) throws IOException {

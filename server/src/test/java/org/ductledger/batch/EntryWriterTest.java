@@ -7,7 +7,6 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import com.fasterxml.jackson.databind.JsonNode;
 import com.fasterxml.jackson.databind.ObjectMapper;
-import java.io.ByteArrayOutputStream;
 import java.io.IOException;
 import org.ductledger.catalogue.FunctionEntry;
 import org.ductledger.flow.StandardCatalogue;
@@ -21,9 +20,7 @@ class EntryWriterTest {
     @Test
     void writesEverythingOfAnEntry() throws IOException {
         FunctionEntry entry = StandardCatalogue.get().find("t_over_t0").orElseThrow();
-        ByteArrayOutputStream out = new ByteArrayOutputStream();
-        EntryWriter.write(entry, out);
-        JsonNode json = new ObjectMapper().readTree(out.toString(UTF_8));
+        JsonNode json = new ObjectMapper().readTree(EntryWriter.one(entry));
         assertEquals("""
                 {"name":"gamma","symbol":"gamma","meaning":"ratio of the specific heats cp/cv, constant",\
                 "unit":"1","interval":{"above":1.0,"at_most":100.0},"sensitivity":"exact"}""", json.get("arguments").get(1).toString());
@@ -47,9 +44,7 @@ class EntryWriterTest {
 
     @Test
     void writesEveryEntryOfTheCatalogueInItsOrder() throws IOException {
-        ByteArrayOutputStream out = new ByteArrayOutputStream();
-        EntryWriter.writeAll(StandardCatalogue.get(), out);
-        JsonNode json = new ObjectMapper().readTree(out.toString(UTF_8));
+        JsonNode json = new ObjectMapper().readTree(EntryWriter.all(StandardCatalogue.get()));
         assertEquals("1.0.0", json.get("library").asText());
         int i = 0;
         for (FunctionEntry entry : StandardCatalogue.get().entries()) {
@@ -63,9 +58,7 @@ class EntryWriterTest {
 
     @Test
     void writesTemplatesWithDefaultsThatTheirReaderTakes() throws Exception {
-        ByteArrayOutputStream out = new ByteArrayOutputStream();
-        TemplateWriter.writeAll("1.0.0", Templates.all(), out);
-        JsonNode json = new ObjectMapper().readTree(out.toString(UTF_8));
+        JsonNode json = new ObjectMapper().readTree(TemplateWriter.all("1.0.0", Templates.all()));
         for (Template template : Templates.all()) {
             JsonNode written = json.get("templates").get(Templates.all().indexOf(template));
             assertEquals(template.name(), written.get("name").asText());

@@ -1,0 +1,135 @@
+package org.ductledger.http;
+
+import static java.nio.charset.StandardCharsets.UTF_8;
+import static org.ductledger.http.LiveService.json;
+import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertTrue;
+
+import com.fasterxml.jackson.databind.JsonNode;
+import java.io.IOException;
+import java.net.http.HttpRequest;
+import java.net.http.HttpResponse;
+import org.junit.jupiter.api.AfterAll;
+import org.junit.jupiter.api.Test;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.CsvSource;
+
+class EvaluateTest {
+    private static final LiveService service = new LiveService();
+
+    private static final String GOOD = """
+            {"ledger":[{"id":"t","call":"t_over_t0","with":{"mach":[0,2],"gamma":1.4}}]}""";
+
+    @AfterAll
+    static void end() {
+        service.close();
+    }
+
+    @Test
+    void answersALedger() throws IOException, InterruptedException {
+        HttpResponse<String> response = service.post("/v1/evaluate", GOOD);
+        assertEquals(200, response.statusCode(), response.body());
+        assertEquals(
+                "application/json",
+                response.headers().firstValue("Content-Type").orElse(""));
+        assertEquals("""
+                {"library":"1.0.0","results":[{"id":"t","call":"t_over_t0","revision":1,"unit":"1",\
+                "values":[1.0,0.5555555555555556],"faults":[]}]}""", response.body());
+    }
+
+    @Test
+    void aRowThatFailsIsAFaultOfAnAnsweredRequest() throws IOException, InterruptedException {
+        HttpResponse<String> response = service.post("/v1/evaluate", GOOD.replace("[0,2]", "[-1,2]"));
+        assertEquals(200, response.statusCode());
+        JsonNode result = json(response).at("/results/0");
+        assertEquals("[null,0.5555555555555556]", result.get("values").toString());
+        assertEquals("""
+                [{"row":0,"kind":"outside_domain","argument":"mach","given":-1.0,\
+                "detail":"mach must be at least 0, got -1"}]""", result.get("faults").toString());
+    }
+
+    /** Issue by issue what an engineer or a script gets wrong; each answer names the place and what is required. */
+    @ParameterizedTest
+    @CsvSource(delimiter = '|', quoteCharacter = '`', textBlock = """
+        # arguments or function                     | status | kind             | pointer                    | detail says
+        {"mach": 1}                                 | 422    | missing_argument | /ledger/0/with/gamma       | t_over_t0 requires gamma
+        {"mach": 1, "gamma": "1.4"}                 | 422    | not_a_number     | /ledger/0/with/gamma       | gamma must be a number, got text
+        {"mach": {"value": 1, "unit": "bar"}, "gamma": 1.4} | 422 | unknown_unit | /ledger/0/with/mach/unit | mach is a pure number, got bar
+        {"mach": {"value": 1, "unit": "psig"}, "gamma": 1.4} | 422 | unknown_unit | /ledger/0/with/mach/unit | is a gauge unit
+        {"mach": {"ref": "t"}, "gamma": 1.4}        | 422    | bad_reference    | /ledger/0/with/mach/ref    | which is not an earlier call
+        {"mach": {"ref": "x"}, "gamma": 1.4}        | 422    | bad_reference    | /ledger/0/with/mach/ref    | no call has that id
+        {"mach": [1, 2], "gamma": [1.4, 1.4, 1.4]}  | 422    | bad_reference    | /ledger/0                  | same number of rows
+        {"mach": [], "gamma": 1.4}                  | 422    | missing_argument | /ledger/0/with/mach        | has no rows
+        {"mach": NaN, "gamma": 1.4}                 | 400    | malformed        | /ledger/0/with/mach        | is not valid JSON
+        {"mach": 1e400, "gamma": 1.4}               | 400    | not_a_number     | /ledger/0/with/mach        | range of a double
+        {"mach": null, "gamma": 1.4}                | 400    | wrong_type       | /ledger/0/with/mach        | got null
+        {"mach": [1, null], "gamma": 1.4}           | 400    | not_a_number     | /ledger/0/with/mach/1      | must be a number, got null
+        {"mach": [1, "2"], "gamma": 1.4}            | 400    | not_a_number     | /ledger/0/with/mach/1      | must be a number, got a text
+        {"mach": 1, "mach": 1, "gamma": 1.4}        | 400    | duplicate_member | /ledger/0/with/mach        | 'mach' is given twice
+        {"mach": 1, "gamma": 1.4                    | 400    | malformed        | /ledger/0/with             | is not valid JSON
+        """)
+    void refusesWithThePlaceAndWhatIsRequired(String with, int status, String kind, String pointer, String detail)
+            throws IOException, InterruptedException {
+        HttpResponse<String> response = service.post(
+                "/v1/evaluate", "{\"ledger\":[{\"id\":\"t\",\"call\":\"t_over_t0\",\"with\":" + with + "}]}");
+        assertProblem(response, status);
+        JsonNode error = json(response).at("/errors/0");
+        assertEquals(kind, error.get("kind").asText(), response.body());
+        assertEquals(pointer, error.get("pointer").asText(), response.body());
+        assertTrue(error.get("detail").asText().contains(detail), response.body());
+        assertEquals(200, service.post("/v1/evaluate", GOOD).statusCode());
+    }
+
+    @Test
+    void refusesACircleAnUnknownFunctionAndNamesEveryReason() throws IOException, InterruptedException {
+        HttpResponse<String> response = service.post("/v1/evaluate", """
+                {"ledger":[
+                 {"id":"a","call":"t_over_t0","with":{"mach":{"ref":"b"},"gamma":1.4}},
+                 {"id":"b","call":"t_over_t0","with":{"mach":{"ref":"a"},"gamma":1.4}},
+                 {"id":"c","call":"t_over_t","with":{}}]}""");
+        assertProblem(response, 422);
+        JsonNode errors = json(response).get("errors");
+        assertEquals("/ledger/0/with/mach/ref", errors.get(0).get("pointer").asText());
+        assertEquals("/ledger/2/call", errors.get(1).get("pointer").asText());
+        assertTrue(errors.get(1).get("detail").asText().contains("near it: t_over_t0"), response.body());
+    }
+
+    @Test
+    void refusesWhatIsNoJsonByItsType() throws IOException, InterruptedException {
+        for (String type : new String[] {"text/plain", "application/json; charset=latin1", "text/json", "a;;b"}) {
+            assertProblem(service.post("/v1/evaluate", type, GOOD.getBytes(UTF_8)), 415);
+        }
+        assertProblem(
+                service.send(service.request("/v1/evaluate").POST(HttpRequest.BodyPublishers.ofString(GOOD))), 415);
+        assertEquals(
+                200,
+                service.post("/v1/evaluate", "Application/JSON; Charset=\"UTF-8\"", GOOD.getBytes(UTF_8))
+                        .statusCode());
+        assertProblem(
+                service.send(service.request("/v1/evaluate")
+                        .header("Content-Type", "application/json")
+                        .header("Content-Encoding", "gzip")
+                        .POST(HttpRequest.BodyPublishers.ofString(GOOD))),
+                415);
+    }
+
+    @Test
+    void refusesAnEmptyAndADeepDocument() throws IOException, InterruptedException {
+        assertProblem(service.post("/v1/evaluate", ""), 400);
+        assertProblem(service.post("/v1/evaluate", "[".repeat(200_000)), 400);
+        assertProblem(service.post("/v1/evaluate", "{\"ledger\":".repeat(50_000)), 400);
+        assertProblem(service.post("/v1/evaluate", GOOD.replace("[0,2]", "1" + "0".repeat(1_000_000))), 413);
+    }
+
+    static void assertProblem(HttpResponse<String> response, int status) throws IOException {
+        assertEquals(status, response.statusCode(), response.body());
+        assertEquals(
+                "application/problem+json",
+                response.headers().firstValue("Content-Type").orElse(""));
+        JsonNode problem = json(response);
+        assertEquals(status, problem.get("status").asInt());
+        assertTrue(problem.get("type").asText().startsWith("urn:ductledger:problem:"), response.body());
+        assertTrue(!problem.get("title").asText().isEmpty()
+                && !problem.get("detail").asText().isEmpty());
+    }
+}
