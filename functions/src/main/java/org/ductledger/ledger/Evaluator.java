@@ -6,18 +6,11 @@ import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Set;
-import java.util.stream.IntStream;
 import org.ductledger.catalogue.Catalogue;
-import org.ductledger.catalogue.Kernel;
 import org.jspecify.annotations.Nullable;
 
 /** Evaluates ledgers against a catalogue, column by column. Thread-safe. */
 public final class Evaluator {
-    /** From this many rows on, a column is computed on all processors, in blocks. */
-    private static final int PARALLEL_ROWS = 16_384;
-
-    private static final int BLOCK_ROWS = 8_192;
-
     private final Catalogue catalogue;
 
     public Evaluator(Catalogue catalogue) {
@@ -56,16 +49,8 @@ public final class Evaluator {
         double[][] arguments = new double[step.inputs().size()][];
         for (int i = 0; i < arguments.length; i++) {
             arguments[i] = coherent(step.inputs().get(i), done);
-            faults.check(i, arguments[i]);
         }
-        double[] result = new double[step.rows()];
-        if (faults.isEmpty()) {
-            apply(step.entry().kernel(), arguments, result);
-        } else {
-            applyTo(faults.soundRows(), step.entry().kernel(), arguments, result);
-        }
-        faults.settle(arguments, result);
-        return result;
+        return new Rows(step, arguments, faults).compute();
     }
 
     private static double[] coherent(Plan.Input input, Map<String, double[]> done) {
@@ -95,38 +80,6 @@ public final class Evaluator {
     private static double place(@Nullable String word, List<String> choices) {
         int place = word == null ? -1 : choices.indexOf(word);
         return place < 0 ? Double.NaN : place;
-    }
-
-    private static void apply(Kernel kernel, double[][] arguments, double[] result) {
-        int rows = result.length;
-        if (rows < PARALLEL_ROWS) {
-            kernel.apply(arguments, 0, rows, result);
-            return;
-        }
-        int blocks = (rows + BLOCK_ROWS - 1) / BLOCK_ROWS;
-        IntStream.range(0, blocks)
-                .parallel()
-                .forEach(b -> kernel.apply(arguments, b * BLOCK_ROWS, Math.min(rows, (b + 1) * BLOCK_ROWS), result));
-    }
-
-    /** Computes some rows only: a kernel is never asked outside its domain. The others become NaN. */
-    private static void applyTo(int[] rows, Kernel kernel, double[][] arguments, double[] result) {
-        Arrays.fill(result, Double.NaN);
-        if (rows.length == 0) {
-            return;
-        }
-        double[][] some = new double[arguments.length][];
-        for (int i = 0; i < some.length; i++) {
-            double[] all = arguments[i];
-            some[i] = all.length == 1
-                    ? all
-                    : Arrays.stream(rows).mapToDouble(row -> all[row]).toArray();
-        }
-        double[] computed = new double[rows.length];
-        apply(kernel, some, computed);
-        for (int i = 0; i < rows.length; i++) {
-            result[rows[i]] = computed[i];
-        }
     }
 
     private static Column shown(Plan.Step step, double[] result, Faults faults) {

@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.BitSet;
 import java.util.Comparator;
 import java.util.List;
+import java.util.stream.IntStream;
 import org.ductledger.catalogue.Argument;
 import org.ductledger.catalogue.Condition;
 import org.ductledger.catalogue.FaultKind;
@@ -31,23 +32,17 @@ final class Faults {
         return List.copyOf(found);
     }
 
-    /** The rows without a fault, in order. */
-    int[] soundRows() {
-        int[] rows = new int[step.rows() - faulty.cardinality()];
-        int row = -1;
-        for (int i = 0; i < rows.length; i++) {
-            row = faulty.nextClearBit(row + 1);
-            rows[i] = row;
-        }
-        return rows;
+    /** The rows of a block without a fault, in order. */
+    int[] soundRows(int from, int to) {
+        return IntStream.range(from, to).filter(row -> !faulty.get(row)).toArray();
     }
 
-    /** Checks an argument's column against its interval, in accepting form, so that NaN never passes. */
-    void check(int place, double[] coherent) {
+    /** Checks rows of an argument's column against its interval, in accepting form, so that NaN never passes. */
+    void check(int place, double[] coherent, int from, int to) {
         Argument argument = step.inputs().get(place).argument();
         double least = argument.interval().least();
         double greatest = argument.interval().greatest();
-        for (int i = 0; i < coherent.length; i++) {
+        for (int i = from; i < to; i++) {
             if (!(coherent[i] >= least && coherent[i] <= greatest)) {
                 blame(coherent, i, outside(place, coherent[i], i));
             }
@@ -111,9 +106,9 @@ final class Faults {
         }
     }
 
-    /** Finds the reason for every result of a sound row that is no finite number, and clears it. */
-    void settle(double[][] arguments, double[] result) {
-        for (int i = 0; i < result.length; i++) {
+    /** Finds the reason for every result of a block's sound rows that is no finite number, and clears it. */
+    void settle(double[][] arguments, double[] result, int from, int to) {
+        for (int i = from; i < to; i++) {
             if (!Double.isFinite(result[i]) && !faulty.get(i)) {
                 add(explain(i, row(arguments, i), result[i]));
                 result[i] = Double.NaN;

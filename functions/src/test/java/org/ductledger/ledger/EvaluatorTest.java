@@ -136,4 +136,12 @@ class EvaluatorTest {
         evaluate(edge("e", Given.numbers(areas, "cm2")));
         assertArrayEquals(new double[] {4, -1, 9}, areas);
     }
+
+    @Test
+    void minusZeroIsZero() throws LedgerRefusedException {
+        Outcome outcome = evaluate(signed("a", Given.numbers(-0.0, 3), Given.numbers(-0.0, 2), RIGHT));
+        assertTrue(outcome.isClean());
+        assertEquals(0, outcome.numbers()[0], 0.0);
+        assertEquals(6, outcome.numbers()[1]);
+    }
 }
