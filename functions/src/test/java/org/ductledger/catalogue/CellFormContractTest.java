@@ -22,6 +22,9 @@ import org.junit.jupiter.params.provider.MethodSource;
 class CellFormContractTest {
     private static final int POINTS = 120;
     private static final double TOLERANCE = 1e-11;
+    /** What a form may say in the place of an error value, as a filled cell does. */
+    private static final String NO_SOLUTION = "no solution";
+
     /** What a rounding of the arguments may do where the function is steep. */
     private static final double ROUNDING = 1e-14;
 
@@ -48,7 +51,8 @@ class CellFormContractTest {
         double exact = entry.kernel().at(row);
         String where = entry + Arrays.toString(row);
         if (!Double.isFinite(exact)) {
-            assertEquals(CellType.ERROR, cell.getCellType(), where + " has no value, the cell shows " + cell);
+            boolean told = cell.getCellType() == CellType.ERROR || NO_SOLUTION.equals(cell.getStringValue());
+            assertTrue(told, () -> where + " has no value, the cell shows " + cell);
         } else if (entry.result().isText()) {
             assertEquals(entry.result().choices().get((int) exact), cell.getStringValue(), where);
         } else {

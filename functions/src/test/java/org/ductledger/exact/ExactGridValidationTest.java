@@ -54,7 +54,19 @@ class ExactGridValidationTest {
                 ExactGrid.of("inv_mach_from_mass_flow_parameter_subsonic.csv", "mach_from_mass_flow_number", "mass_flow_number")
                         .with("branch", "subsonic"),
                 ExactGrid.of("inv_mach_from_mass_flow_parameter_supersonic.csv", "mach_from_mass_flow_number", "mass_flow_number")
-                        .with("branch", "supersonic"));
+                        .with("branch", "supersonic"),
+                ExactGrid.of("normal_shock_m2.csv", "shock_mach2", "mach1"),
+                ExactGrid.of("normal_shock_p2_p1.csv", "shock_p2_over_p1", "mach1"),
+                ExactGrid.of("normal_shock_t2_t1.csv", "shock_t2_over_t1", "mach1"),
+                ExactGrid.of("normal_shock_rho2_rho1.csv", "shock_rho2_over_rho1", "mach1"),
+                ExactGrid.of("normal_shock_p02_p01.csv", "shock_p02_over_p01", "mach1"),
+                ExactGrid.of("normal_shock_p02_p1.csv", "shock_p02_over_p1", "mach1"),
+                ExactGrid.of("inv_normal_shock_m1_from_m2.csv", "mach1_from_shock_mach2", "mach2"),
+                ExactGrid.of("inv_normal_shock_m1_from_p2_p1.csv", "mach1_from_shock_p2_over_p1", "p2_over_p1"),
+                ExactGrid.of("inv_normal_shock_m1_from_t2_t1.csv", "mach1_from_shock_t2_over_t1", "t2_over_t1"),
+                ExactGrid.of("inv_normal_shock_m1_from_rho2_rho1.csv", "mach1_from_shock_rho2_over_rho1", "rho2_over_rho1"),
+                ExactGrid.of("inv_normal_shock_m1_from_p02_p01.csv", "mach1_from_shock_p02_over_p01", "p02_over_p01"),
+                ExactGrid.of("inv_normal_shock_m1_from_p02_p1.csv", "mach1_from_shock_p02_over_p1", "p02_over_p1"));
     }
     // spotless:on
 
