@@ -1,6 +1,9 @@
 package org.ductledger.catalogue;
 
+import java.util.LinkedHashMap;
 import java.util.List;
+import java.util.Map;
+import java.util.Objects;
 
 /**
  * A unit as engineers type it, and the way to the coherent unit of its kind: {@code coherent = (x + offset) * scale}.
@@ -9,6 +12,12 @@ import java.util.List;
  * difference ({@code delta_K}), an angle ({@code deg}) is not a pure number ({@code 1}).
  */
 public final class Unit {
+    private static final Map<String, Unit> BY_SYMBOL = new LinkedHashMap<>();
+
+    static {
+        UnitTable.all().forEach(row -> BY_SYMBOL.put(row.symbol(), new Unit(row)));
+    }
+
     public static final Unit ONE = Unit.named("1");
 
     private final String symbol;
@@ -16,11 +25,11 @@ public final class Unit {
     private final double scale;
     private final double offset;
 
-    Unit(String symbol, String coherent, double scale, double offset) {
-        this.symbol = symbol;
-        this.coherent = coherent;
-        this.scale = scale;
-        this.offset = offset;
+    private Unit(UnitTable.Row row) {
+        symbol = row.symbol();
+        coherent = row.coherent();
+        scale = row.scale();
+        offset = row.offset();
     }
 
     /**
@@ -29,12 +38,12 @@ public final class Unit {
      * @throws UnknownUnitException if there is none, naming the reason (a gauge unit) or what is near
      */
     public static Unit named(String symbol) {
-        return UnitTable.find(symbol);
+        return Objects.requireNonNull(BY_SYMBOL.get(UnitTable.find(symbol).symbol()));
     }
 
     /** Every unit, in the order of the table: kind by kind, the coherent one first. */
     public static List<Unit> all() {
-        return UnitTable.all();
+        return List.copyOf(BY_SYMBOL.values());
     }
 
     public String symbol() {

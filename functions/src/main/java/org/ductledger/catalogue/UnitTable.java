@@ -28,8 +28,8 @@ import tech.units.indriya.function.RationalNumber;
  * here as rationals; the units library multiplies them out and checks that a unit is of the kind it stands under.
  */
 final class UnitTable {
-    private static final Map<String, Unit> BY_SPELLING = new LinkedHashMap<>();
-    private static final List<Unit> ALL = new ArrayList<>();
+    private static final Map<String, Row> BY_SPELLING = new LinkedHashMap<>();
+    private static final List<Row> ALL = new ArrayList<>();
 
     // NIST SP 811, section B.6 and footnotes: 1 in = 2.54 cm, 1 lb = 0.453 592 37 kg, g_n = 9.806 65 m/s2, all exact.
     private static final javax.measure.Unit<?> INCH = METRE.multiply(ratio(254, 10_000));
@@ -153,25 +153,28 @@ final class UnitTable {
 
         // Trade practice: the catalogue takes and gives angles in degrees. pi is no ratio of integers, so that radian
         // stands here with its factor rounded once (57.295 779 513 082 32...).
-        put(new Unit("deg", "deg", 1, 0), "°");
-        put(new Unit("rad", "deg", 57.29577951308232, 0));
+        put(new Row("deg", "deg", 1, 0), "°");
+        put(new Row("rad", "deg", 57.29577951308232, 0));
     }
 
     private UnitTable() {}
 
+    /** A line of the table: {@code coherent = (x + offset) * scale}. */
+    record Row(String symbol, String coherent, double scale, double offset) {}
+
     /** A kind of quantity under its coherent unit, and the units that measure it. */
     private record Kind(String coherent, javax.measure.Unit<?> definition) {
         static Kind of(String coherent, javax.measure.Unit<?> definition, String... spellings) {
-            put(new Unit(coherent, coherent, 1, 0), spellings);
+            put(new Row(coherent, coherent, 1, 0), spellings);
             return new Kind(coherent, definition);
         }
 
         void add(String symbol, javax.measure.Unit<?> unit, String... spellings) {
-            put(new Unit(symbol, coherent, factor(unit), 0), spellings);
+            put(new Row(symbol, coherent, factor(unit), 0), spellings);
         }
 
         void addShifted(String symbol, javax.measure.Unit<?> step, String zero, String... spellings) {
-            put(new Unit(symbol, coherent, factor(step), Double.parseDouble(zero)), spellings);
+            put(new Row(symbol, coherent, factor(step), Double.parseDouble(zero)), spellings);
         }
 
         private double factor(javax.measure.Unit<?> unit) {
@@ -197,7 +200,7 @@ final class UnitTable {
         return new BigDecimal(exact.toString()).doubleValue();
     }
 
-    private static void put(Unit unit, String... spellings) {
+    private static void put(Row unit, String... spellings) {
         ALL.add(unit);
         BY_SPELLING.put(unit.symbol(), unit);
         for (String spelling : spellings) {
@@ -205,12 +208,17 @@ final class UnitTable {
         }
     }
 
-    static List<Unit> all() {
+    static List<Row> all() {
         return List.copyOf(ALL);
     }
 
-    static Unit find(String symbol) {
-        Unit unit = BY_SPELLING.get(symbol);
+    /**
+     * The line of a unit.
+     *
+     * @throws UnknownUnitException if there is none, naming the reason or what is near
+     */
+    static Row find(String symbol) {
+        Row unit = BY_SPELLING.get(symbol);
         if (unit == null) {
             throw new UnknownUnitException(refusal(symbol));
         }
@@ -235,8 +243,8 @@ final class UnitTable {
             return "";
         }
         return BY_SPELLING.values().stream()
-                .filter(unit -> unit.coherent().symbol().equals("Pa"))
-                .map(Unit::symbol)
+                .filter(unit -> unit.coherent().equals("Pa"))
+                .map(Row::symbol)
                 .filter(known -> known.toLowerCase(Locale.ROOT).equals(plain))
                 .findFirst()
                 .orElse("");
