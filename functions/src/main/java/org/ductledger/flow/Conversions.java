@@ -98,9 +98,9 @@ final class Conversions {
     private static final Argument DIAMETER =
             Argument.number("diameter", "D", "m", Interval.above(0), "diameter of a circular section");
     private static final Argument MASS_FLOW_FRACTION = Argument.number(
-            "mass_flow_fraction", "m/mmax", "1", Interval.closed(0, 1), "mass flow over the choked mass flow");
+            "mass_flow_fraction", "qm/qm*", "1", Interval.closed(0, 1), "mass flow over the choked mass flow");
     private static final Argument CHOKED_MASS_FLOW =
-            Argument.number("choked_mass_flow", "mmax", "kg/s", Interval.above(0), "mass flow with a sonic throat");
+            Argument.number("choked_mass_flow", "qm*", "kg/s", Interval.above(0), "mass flow with a sonic throat");
     private static final Argument THRUST_COEFFICIENT = Argument.number(
             "thrust_coefficient", "CF", "1", Interval.anyNumber(), "thrust over p0 At; negative where it is a drag");
 
@@ -193,8 +193,8 @@ final class Conversions {
     private static final FunctionEntry MASS_FLOW_FROM_FRACTION = productEntry(
                     "mass_flow_from_fraction", MASS_FLOW_FRACTION, CHOKED_MASS_FLOW)
             .title("Mass flow from its fraction of the choked mass flow")
-            .formula("m = (m/mmax) mmax")
-            .gives("m", "kg/s", Interval.atLeast(0))
+            .formula("qm = (qm/qm*) qm*")
+            .gives("qm", "kg/s", Interval.atLeast(0))
             .sources(Sources.SHAPIRO.at("chapter 4, Isentropic Flow"))
             .example("1.5", 0.75, 2.0)
             .build();

@@ -26,4 +26,22 @@ class FlowRatesTest {
         assertEquals(Math.sqrt(1.4) * 1e200, FlowRates.speedOfSound(1.4, 1e200, 1e200), 1e186);
         assertEquals(Math.sqrt(1.4) * 1e-200, FlowRates.speedOfSound(1.4, 1e-200, 1e-200), 1e-214);
     }
+
+    @Test
+    void theChokedFlowAsItIsComputedGivesMachOneOnBothBranches() {
+        for (double gamma = 1.01; gamma < 1.7; gamma += 0.0137) {
+            double choked = FlowRates.chokedMassFlow(6.3e5, 291, 1.7e-3, gamma, 296.8);
+            assertEquals(1, FlowRates.machFromMassFlow(choked, 6.3e5, 291, 1.7e-3, gamma, 296.8, 0));
+            assertEquals(1, FlowRates.machFromMassFlow(choked, 6.3e5, 291, 1.7e-3, gamma, 296.8, 1));
+            double above = Math.nextUp(choked);
+            assertEquals(Double.NaN, FlowRates.machFromMassFlow(above, 6.3e5, 291, 1.7e-3, gamma, 296.8, 0));
+        }
+    }
+
+    @Test
+    void theThroatPassesTheMassFlowItWasSizedFor() {
+        double area = FlowRates.throatArea(2, 7e5, 300, 1.4, 287.05);
+        assertEquals(2, FlowRates.chokedMassFlow(7e5, 300, area, 1.4, 287.05), 1e-15);
+        assertEquals(2, FlowRates.massFlow(1, 7e5, 300, area, 1.4, 287.05), 1e-15);
+    }
 }

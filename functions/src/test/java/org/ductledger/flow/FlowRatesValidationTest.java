@@ -25,4 +25,29 @@ class FlowRatesValidationTest {
         assertEquals(
                 0.66667, FlowRates.flowSpeed(2, 300, 1.4, 287.05) / FlowRates.maxFlowSpeed(300, 1.4, 287.05), 5e-6);
     }
+
+    /**
+     * The choked flow of air by Fliegner's formula, m sqrt(T0)/(p0 A) = 0.04042 in SI units for gamma = 1.4 and
+     * R = 287 J/(kg K) (common practice, from memory: 0.532 in lbm/s, degR, lbf).
+     */
+    @Test
+    void airChokesAsFliegnerFound() {
+        assertEquals(0.04042, FlowRates.chokedMassFlow(1, 1, 1, 1.4, 287), 5e-6);
+        assertEquals(0.532, 0.04042 * POUNDS_FORCE / POUNDS * ROOT_RANKINE, 5e-4);
+        assertEquals(1, FlowRates.throatArea(0.04042, 1, 1, 1.4, 287), 2e-4);
+    }
+
+    private static final double POUNDS_FORCE = 4.4482216152605;
+    private static final double POUNDS = 0.45359237;
+    private static final double ROOT_RANKINE = Math.sqrt(1.8);
+
+    /** NACA Report 1135, tables I and II: at M = 0.5 and at M = 2 A/A* is 1.3398 and 1.6875 (from memory). */
+    @Test
+    void theMassFlowFallsFromItsChokedValueAsTheAreaRatioRises() {
+        double choked = FlowRates.chokedMassFlow(7e5, 300, 1e-3, 1.4, 287.05);
+        assertEquals(1.3398, choked / FlowRates.massFlow(0.5, 7e5, 300, 1e-3, 1.4, 287.05), 5e-5);
+        assertEquals(1.6875, choked / FlowRates.massFlow(2, 7e5, 300, 1e-3, 1.4, 287.05), 5e-5);
+        assertEquals(0.5, FlowRates.machFromMassFlow(choked / 1.3398, 7e5, 300, 1e-3, 1.4, 287.05, 0), 5e-5);
+        assertEquals(2, FlowRates.machFromMassFlow(choked / 1.6875, 7e5, 300, 1e-3, 1.4, 287.05, 1), 5e-5);
+    }
 }
