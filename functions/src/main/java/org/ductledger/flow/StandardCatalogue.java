@@ -27,6 +27,7 @@ public final class StandardCatalogue {
                 AreaRule.entries(),
                 FlowRates.entries(),
                 NormalShock.entries(),
+                Nozzle.entries(),
                 Fan.entries(),
                 Atmosphere.entries(),
                 Gases.entries(),

@@ -55,6 +55,8 @@ class NormalShockTest {
         double below = NormalShock.p02OverP01(NormalShock.HUGE_MACH, 3);
         double above = NormalShock.p02OverP01(Math.nextUp(NormalShock.HUGE_MACH), 3);
         assertEquals(1, above / below, 1e-14);
+        double mach1 = NormalShockInverse.fromP02OverP01(0.5 * below, 3);
+        assertEquals(0.5, NormalShock.p02OverP01(mach1, 3) / below, 1e-14);
     }
 
     @ParameterizedTest
