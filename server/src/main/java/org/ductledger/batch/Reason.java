@@ -18,6 +18,8 @@ public record Reason(String kind, String pointer, String detail) {
     public static final String WRONG_TYPE = "wrong_type";
 
     public static final String LIMIT_EXCEEDED = "limit_exceeded";
+    /** An input of a template that it cannot take. */
+    public static final String UNFIT_INPUT = "unfit_input";
 
     /** A member's name as one step of a JSON Pointer. */
     static String step(String name) {

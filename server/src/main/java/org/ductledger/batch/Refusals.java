@@ -7,8 +7,9 @@ import org.ductledger.ledger.Ledger;
 import org.ductledger.ledger.LedgerRefusedException;
 import org.ductledger.ledger.Reference;
 import org.ductledger.ledger.Refusal;
+import org.ductledger.template.InputsRefusedException;
 
-/** Finds the places in a ledger's document of what the evaluator refuses. */
+/** Finds the places, in a document, of what the evaluator or a template refuses. */
 public final class Refusals {
     private Refusals() {}
 
@@ -19,6 +20,13 @@ public final class Refusals {
             reasons.add(new Reason(refusal.kind().label(), pointer(ledger, refusal), refusal.detail()));
         }
         return new DocumentRefusedException(reasons);
+    }
+
+    /** The refusal of a template's inputs as that of their document. */
+    public static DocumentRefusedException placed(InputsRefusedException refused) {
+        return new DocumentRefusedException(refused.problems().stream()
+                .map(problem -> new Reason(Reason.UNFIT_INPUT, Reason.step(problem.input()), problem.detail()))
+                .toList());
     }
 
     private static String pointer(Ledger ledger, Refusal refusal) {

@@ -41,12 +41,8 @@ final class EvaluateEndpoint implements Endpoint {
         try {
             return evaluator.evaluate(ledger);
         } catch (LedgerRefusedException e) {
-            DocumentRefusedException placed = Refusals.placed(ledger, e);
-            throw new ProblemException(new Problem(
-                    StatusCodes.UNPROCESSABLE_ENTITY,
-                    "Unsound ledger",
-                    placed.reasons().get(0).detail(),
-                    placed.reasons()));
+            throw new ProblemException(
+                    Problems.refused(StatusCodes.UNPROCESSABLE_ENTITY, "Unsound ledger", Refusals.placed(ledger, e)));
         }
     }
 }

@@ -6,6 +6,7 @@ import io.undertow.util.StatusCodes;
 import java.io.IOException;
 import java.util.UUID;
 import org.ductledger.batch.DocumentRefusedException;
+import org.ductledger.record.UnreadableWorkbookException;
 import org.slf4j.Logger;
 import org.slf4j.LoggerFactory;
 import org.xnio.IoUtils;
@@ -60,18 +61,19 @@ final class Problems {
         }
         if (cause instanceof DocumentRefusedException refused) {
             return refused.isTooLarge()
-                    ? new Problem(
-                            StatusCodes.REQUEST_ENTITY_TOO_LARGE,
-                            "Document too large",
-                            refused.reasons().get(0).detail(),
-                            refused.reasons())
-                    : new Problem(
-                            StatusCodes.BAD_REQUEST,
-                            "Document refused",
-                            refused.reasons().get(0).detail(),
-                            refused.reasons());
+                    ? refused(StatusCodes.REQUEST_ENTITY_TOO_LARGE, "Document too large", refused)
+                    : refused(StatusCodes.BAD_REQUEST, "Document refused", refused);
+        }
+        if (cause instanceof UnreadableWorkbookException unreadable) {
+            return new Problem(
+                    StatusCodes.UNPROCESSABLE_ENTITY, "Unreadable workbook", String.valueOf(unreadable.getMessage()));
         }
         return internal(cause);
+    }
+
+    /** The problem of a document with its reasons. */
+    static Problem refused(int status, String title, DocumentRefusedException refused) {
+        return new Problem(status, title, refused.reasons().get(0).detail(), refused.reasons());
     }
 
     /** An error of the service's own: the answer says nothing but where the log explains it. */

@@ -15,6 +15,7 @@ import org.ductledger.batch.Limits;
  * @param idleTime of a connection between requests
  * @param concurrent requests worked on at once; single cells are not among them
  * @param shutdownTime that running requests have when the service ends
+ * @param requestLog whether each request is logged
  */
 public record ServerOptions(
         Limits limits,
@@ -25,7 +26,8 @@ public record ServerOptions(
         Duration requestTime,
         Duration idleTime,
         int concurrent,
-        Duration shutdownTime) {
+        Duration shutdownTime,
+        boolean requestLog) {
     private static final int MEBIBYTE = 1 << 20;
 
     public static final ServerOptions STANDARD = new ServerOptions(
@@ -37,20 +39,53 @@ public record ServerOptions(
             Duration.ofSeconds(180),
             Duration.ofSeconds(75),
             32,
-            Duration.ofSeconds(20));
+            Duration.ofSeconds(20),
+            true);
 
     public ServerOptions withBodyBytes(int most) {
         return new ServerOptions(
-                limits, most, headerBytes, headerTime, bodyTime, requestTime, idleTime, concurrent, shutdownTime);
+                limits,
+                most,
+                headerBytes,
+                headerTime,
+                bodyTime,
+                requestTime,
+                idleTime,
+                concurrent,
+                shutdownTime,
+                requestLog);
     }
 
     public ServerOptions withTimes(Duration header, Duration body, Duration request) {
         return new ServerOptions(
-                limits, bodyBytes, headerBytes, header, body, request, idleTime, concurrent, shutdownTime);
+                limits, bodyBytes, headerBytes, header, body, request, idleTime, concurrent, shutdownTime, requestLog);
     }
 
     public ServerOptions withConcurrent(int most) {
         return new ServerOptions(
-                limits, bodyBytes, headerBytes, headerTime, bodyTime, requestTime, idleTime, most, shutdownTime);
+                limits,
+                bodyBytes,
+                headerBytes,
+                headerTime,
+                bodyTime,
+                requestTime,
+                idleTime,
+                most,
+                shutdownTime,
+                requestLog);
+    }
+
+    public ServerOptions withoutRequestLog() {
+        return new ServerOptions(
+                limits,
+                bodyBytes,
+                headerBytes,
+                headerTime,
+                bodyTime,
+                requestTime,
+                idleTime,
+                concurrent,
+                shutdownTime,
+                false);
     }
 }

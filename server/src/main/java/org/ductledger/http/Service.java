@@ -4,6 +4,9 @@ import io.undertow.server.HttpHandler;
 import java.nio.charset.StandardCharsets;
 import java.util.ArrayList;
 import java.util.List;
+import org.ductledger.audit.AuditReport;
+import org.ductledger.audit.Auditor;
+import org.ductledger.batch.AuditWriter;
 import org.ductledger.batch.EntryWriter;
 import org.ductledger.batch.Json;
 import org.ductledger.batch.LedgerReader;
@@ -29,7 +32,8 @@ final class Service {
     }
 
     HttpHandler handler() {
-        return new RequestLog(new Deadline(options, new Router(new Guard(), admission, routes())));
+        HttpHandler handler = new Deadline(options, new Router(new Guard(), admission, routes()));
+        return options.requestLog() ? new RequestLog(handler) : handler;
     }
 
     private List<Route> routes() {
@@ -44,6 +48,8 @@ final class Service {
         Endpoint templates = new NamedDocuments("template", this::template, Templates::near);
         routes.add(Route.get("/v1/templates", templates));
         routes.add(Route.get("/v1/templates/{name}", templates));
+        routes.add(Route.post("/v1/workbooks/{name}", work(new WorkbookEndpoint(bodies, reader, evaluator))));
+        routes.add(Route.post("/v1/audit", work(audit(bodies))));
         routes.add(Route.get("/v1/health", health()));
         routes.add(Route.get("/", welcome(routes)));
         return routes;
@@ -63,6 +69,14 @@ final class Service {
         return name.isEmpty()
                 ? TemplateWriter.all(catalogue.version(), Templates.all())
                 : Templates.find(name).map(TemplateWriter::one).orElse(NONE);
+    }
+
+    private Endpoint audit(Bodies bodies) {
+        Auditor auditor = new Auditor(evaluator);
+        return (exchange, name) -> {
+            AuditReport report = auditor.audit(bodies.read(exchange, Answers.XLSX));
+            Answers.send(exchange, Answers.JSON, AuditWriter.document(report));
+        };
     }
 
     private Endpoint health() {

@@ -64,6 +64,15 @@ public final class LiveService implements AutoCloseable {
         return send(request(path).header("Content-Type", mediaType).POST(HttpRequest.BodyPublishers.ofByteArray(body)));
     }
 
+    public HttpResponse<byte[]> postForBytes(String path, String json) throws IOException, InterruptedException {
+        return client.send(
+                request(path)
+                        .header("Content-Type", "application/json")
+                        .POST(HttpRequest.BodyPublishers.ofString(json))
+                        .build(),
+                BodyHandlers.ofByteArray());
+    }
+
     /** What the service answers to these bytes on one connection, until it closes it. */
     public String raw(String... chunks) throws IOException {
         try (Socket socket = connect()) {

@@ -1,14 +1,12 @@
 package org.ductledger.audit;
 
-import java.io.ByteArrayInputStream;
 import java.io.IOException;
+import java.io.UncheckedIOException;
 import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
 import java.util.Map;
 import java.util.TreeMap;
-import org.apache.poi.ooxml.POIXMLException;
-import org.apache.poi.openxml4j.exceptions.OpenXML4JRuntimeException;
 import org.apache.poi.xssf.usermodel.XSSFWorkbook;
 import org.ductledger.catalogue.FunctionEntry;
 import org.ductledger.catalogue.Revision;
@@ -22,6 +20,7 @@ import org.ductledger.record.RecordPlaces;
 import org.ductledger.record.RecordReader;
 import org.ductledger.record.RecordedCall;
 import org.ductledger.record.UnreadableWorkbookException;
+import org.ductledger.record.WorkbookFile;
 import org.ductledger.template.WorkbookBuilder;
 
 /**
@@ -42,10 +41,10 @@ public final class Auditor {
      * @throws UnreadableWorkbookException if it is no workbook with a record, naming the place
      */
     public AuditReport audit(byte[] workbook) throws UnreadableWorkbookException {
-        try (XSSFWorkbook book = new XSSFWorkbook(new ByteArrayInputStream(workbook))) {
+        try (XSSFWorkbook book = WorkbookFile.open(workbook)) {
             return audit(book);
-        } catch (IOException | POIXMLException | OpenXML4JRuntimeException e) {
-            throw new UnreadableWorkbookException("the file", "an XLSX workbook", "a file that does not open as one");
+        } catch (IOException e) {
+            throw new UncheckedIOException("a workbook in memory could not be closed", e);
         }
     }
 
