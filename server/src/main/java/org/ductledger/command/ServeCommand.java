@@ -39,7 +39,7 @@ final class ServeCommand implements Callable<Integer> {
         }
         DuctledgerServer server = start();
         CountDownLatch ended = new CountDownLatch(1);
-        Thread ending = new Thread(() -> end(server, ended), "ending");
+        Thread ending = new Thread(() -> endOnSignal(server, ended), "ending");
         try {
             if (portFile != null) {
                 PortFile.write(portFile, server);
@@ -63,6 +63,12 @@ final class ServeCommand implements Callable<Integer> {
         } catch (IOException e) {
             throw CommandException.machine(e.getMessage());
         }
+    }
+
+    /** What a signal asked for is done once the running requests are: the process ends well, and not as if killed. */
+    private void endOnSignal(DuctledgerServer server, CountDownLatch ended) {
+        end(server, ended);
+        Runtime.getRuntime().halt(ExitCode.DONE);
     }
 
     private void end(DuctledgerServer server, CountDownLatch ended) {

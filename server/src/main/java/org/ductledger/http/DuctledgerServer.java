@@ -5,6 +5,7 @@ import io.undertow.UndertowOptions;
 import java.io.IOException;
 import java.net.BindException;
 import java.net.InetSocketAddress;
+import java.util.concurrent.atomic.AtomicBoolean;
 import org.ductledger.flow.StandardCatalogue;
 import org.ductledger.ledger.Evaluator;
 import org.slf4j.Logger;
@@ -21,6 +22,7 @@ public final class DuctledgerServer implements AutoCloseable {
     private final Undertow undertow;
     private final Admission admission;
     private final ServerOptions options;
+    private final AtomicBoolean closed = new AtomicBoolean();
 
     private DuctledgerServer(Undertow undertow, Admission admission, ServerOptions options) {
         this.undertow = undertow;
@@ -86,9 +88,12 @@ public final class DuctledgerServer implements AutoCloseable {
         return "http://" + LOOPBACK + ":" + port();
     }
 
-    /** Ends the service: running requests end first, new ones are refused. */
+    /** Ends the service: running requests end first, new ones are refused. Once ended, it stays so. */
     @Override
     public void close() {
+        if (closed.getAndSet(true)) {
+            return;
+        }
         if (!admission.end(options.shutdownTime())) {
             LOG.warn("requests still run after {}; they are cut short", options.shutdownTime());
         }

@@ -48,6 +48,59 @@ class EvaluateTest {
                 "detail":"mach must be at least 0, got -1"}]""", result.get("faults").toString());
     }
 
+    /** References, columns, spread values, words and units in one ledger, and only what is wanted in the answer. */
+    @Test
+    void answersAWholeChain() throws IOException, InterruptedException {
+        HttpResponse<String> response = service.post("/v1/evaluate", """
+                {"ledger": [
+                  {"id": "m_exit", "call": "mach_from_area_ratio",
+                   "with": {"area_ratio": [1.439, 2.0, 4.0], "gamma": 1.4, "branch": "supersonic"}},
+                  {"id": "p_exit", "call": "p_over_p0", "with": {"mach": {"ref": "m_exit"}, "gamma": 1.4}},
+                  {"id": "flow", "call": "choked_mass_flow",
+                   "with": {"p0": {"value": 7, "unit": "bar"}, "t0": 293.15, "area": {"value": 1.2, "unit": "in2"},
+                            "gamma": 1.4, "gas_constant": 296.8}, "unit": "kg/h"},
+                  {"id": "role", "call": "passage_role", "with": {"mach": {"ref": "m_exit"}, "area_change": 1}}],
+                 "want": ["p_exit", "flow", "role"]}""");
+        assertEquals(200, response.statusCode(), response.body());
+        JsonNode results = json(response).get("results");
+        assertEquals(3, results.size());
+        JsonNode p = results.get(0);
+        assertEquals("p_exit", p.get("id").asText());
+        // NACA Report 1135, table II (from memory): at M = 1.80, A/A* is 1.439 and p/pt is .1740.
+        assertEquals(0.1740, p.at("/values/0").asDouble(), 2e-4);
+        assertEquals(3, p.get("values").size());
+        JsonNode flow = results.get(1);
+        assertEquals("kg/h", flow.get("unit").asText());
+        assertEquals(1, flow.get("values").size());
+        assertEquals(
+                "[\"nozzle\",\"nozzle\",\"nozzle\"]",
+                results.get(2).get("values").toString());
+        assertEquals("1", results.get(2).get("unit").asText());
+        for (JsonNode result : results) {
+            assertEquals("[]", result.get("faults").toString());
+        }
+    }
+
+    @ParameterizedTest
+    @CsvSource(delimiter = '|', textBlock = """
+        t_over_t0            | {"mach": 1, "gamma": 1}                                             | gamma      | greater than 1
+        t_over_t0            | {"mach": -1, "gamma": 1.4}                                          | mach       | at least 0, got -1
+        mach_from_area_ratio | {"area_ratio": 0.5, "gamma": 1.4, "branch": "subsonic"}             | area_ratio | at least 1, got 0.5
+        mach_from_area_ratio | {"area_ratio": 2, "gamma": 1.4, "branch": "transonic"}              | branch     | got 'transonic'
+        choked_mass_flow     | {"p0": {"value": -1, "unit": "bar"}, "t0": 293.15, "area": 1, "gamma": 1.4, "gas_constant": 287} | p0 | greater than 0 bar, got -1 bar
+        """)
+    void aRowOutsideTheDomainSaysWhatIsRequiredAndGiven(String call, String with, String argument, String detail)
+            throws IOException, InterruptedException {
+        HttpResponse<String> response = service.post(
+                "/v1/evaluate", "{\"ledger\":[{\"id\":\"a\",\"call\":\"" + call + "\",\"with\":" + with + "}]}");
+        assertEquals(200, response.statusCode(), response.body());
+        JsonNode fault = json(response).at("/results/0/faults/0");
+        assertEquals("outside_domain", fault.get("kind").asText());
+        assertEquals(argument, fault.get("argument").asText());
+        assertTrue(fault.get("detail").asText().contains(detail), response.body());
+        assertEquals("[null]", json(response).at("/results/0/values").toString());
+    }
+
     /** Issue by issue what an engineer or a script gets wrong; each answer names the place and what is required. */
     @ParameterizedTest
     @CsvSource(delimiter = '|', quoteCharacter = '`', textBlock = """
