@@ -6,6 +6,7 @@ import java.util.Map;
 import java.util.Set;
 import org.ductledger.record.RecordedArgument.FromCall;
 import org.ductledger.record.RecordedArgument.FromQuantity;
+import org.ductledger.record.RecordedArgument.FromRows;
 import org.ductledger.record.RecordedArgument.Origin;
 
 /** A {@code call} line as it is read, and the values that belong to it. */
@@ -18,48 +19,51 @@ record CallLine(RecordLine line, ValueLines values) {
      */
     RecordedCall call(Map<String, Integer> quantities, Set<String> ids) throws UnreadableWorkbookException {
         List<RecordedArgument> arguments = new ArrayList<>();
-        for (int column = RecordForm.FIRST_ARGUMENT_COLUMN; !line.text(column).isEmpty(); column++) {
-            arguments.add(argument(column, quantities, ids));
+        if (!line.text(RecordForm.ARGUMENTS).isEmpty()) {
+            for (String text : line.text(RecordForm.ARGUMENTS).split(RecordForm.NEXT, -1)) {
+                arguments.add(argument(text, quantities, ids));
+            }
         }
         return new RecordedCall(
-                line.required(1),
-                line.required(2),
-                line.count(3),
-                line.text(4),
+                line.required(RecordForm.NAME),
+                line.required(RecordForm.WHAT),
+                line.count(RecordForm.REVISION),
+                line.text(RecordForm.UNIT),
                 arguments,
-                line.text(8),
-                line.text(9),
+                line.text(RecordForm.LIVE),
+                line.text(RecordForm.FILLED),
                 values.column(),
                 values.faults());
     }
 
-    private RecordedArgument argument(int column, Map<String, Integer> quantities, Set<String> ids)
+    private RecordedArgument argument(String text, Map<String, Integer> quantities, Set<String> ids)
             throws UnreadableWorkbookException {
-        String text = line.text(column);
+        int column = RecordForm.ARGUMENTS;
         int is = text.indexOf(RecordForm.IS);
         int at = text.lastIndexOf(RecordForm.AT);
         if (is < 0 || at < is) {
             throw line.damaged(column, "an argument as 'name = origin @ cells'");
         }
         Origin origin = origin(text.substring(is + RecordForm.IS.length(), at), column);
-        boolean known =
-                origin instanceof FromCall call ? ids.contains(call.id()) : has((FromQuantity) origin, quantities);
+        boolean known = origin instanceof FromCall call ? ids.contains(call.id()) : has(origin, quantities);
         if (!known) {
             throw line.damaged(column, "an argument whose origin the record has");
         }
         return new RecordedArgument(text.substring(0, is), origin, text.substring(at + RecordForm.AT.length()));
     }
 
-    private static boolean has(FromQuantity origin, Map<String, Integer> quantities) {
-        Integer rows = quantities.get(origin.quantity());
-        return rows != null && origin.rows().stream().allMatch(row -> row < rows);
+    private static boolean has(Origin origin, Map<String, Integer> quantities) {
+        return origin instanceof FromRows from
+                ? from.rows().stream().allMatch(row -> row.row() < quantities.getOrDefault(row.quantity(), 0))
+                : quantities.containsKey(((FromQuantity) origin).quantity());
     }
 
     private Origin origin(String text, int column) throws UnreadableWorkbookException {
         try {
             return OriginText.parse(text);
         } catch (IllegalArgumentException e) {
-            throw line.because(column, "an argument whose origin reads 'call id' or 'quantity name'", e);
+            throw line.because(
+                    column, "an argument whose origin reads 'call id', 'quantity name' or 'rows name:row'", e);
         }
     }
 }

@@ -7,6 +7,9 @@ import java.math.MathContext;
 final class Digits {
     private static final MathContext SEVENTEEN = new MathContext(17);
 
+    /** From here on an exponent is shorter than zeros. */
+    private static final int MOST_ZEROS = 6;
+
     private Digits() {}
 
     /**
@@ -14,6 +17,8 @@ final class Digits {
      * every JVM.
      */
     static String of(double x) {
-        return new BigDecimal(x).round(SEVENTEEN).stripTrailingZeros().toString();
+        BigDecimal rounded = new BigDecimal(x).round(SEVENTEEN).stripTrailingZeros();
+        int exponent = rounded.precision() - rounded.scale() - 1;
+        return Math.abs(exponent) < MOST_ZEROS ? rounded.toPlainString() : rounded.toString();
     }
 }

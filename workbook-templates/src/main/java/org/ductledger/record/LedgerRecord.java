@@ -12,7 +12,10 @@ import org.ductledger.ledger.Ledger;
 import org.ductledger.ledger.Reference;
 import org.ductledger.record.RecordedArgument.FromCall;
 import org.ductledger.record.RecordedArgument.FromQuantity;
+import org.ductledger.record.RecordedArgument.FromRows;
+import org.ductledger.record.RecordedArgument.Row;
 import org.ductledger.record.RecordedQuantity.Role;
+import org.jspecify.annotations.Nullable;
 
 /**
  * The machine-readable record of a workbook, as its {@code Ledger} sheet holds it.
@@ -79,23 +82,30 @@ public record LedgerRecord(
         if (origin instanceof FromCall call) {
             return new Reference(call.id());
         }
-        FromQuantity from = (FromQuantity) origin;
-        RecordedQuantity quantity = quantity(from.quantity());
-        Column column = rows(quantity.values(), from.rows());
-        String unit = quantity.unit().isEmpty() ? null : quantity.unit();
-        return new Given.Values(column, column.rows() == 1, unit);
+        if (origin instanceof FromRows from) {
+            return values(
+                    rows(from.rows()), quantity(from.rows().get(0).quantity()).unit());
+        }
+        RecordedQuantity quantity = quantity(((FromQuantity) origin).quantity());
+        return values(quantity.values(), quantity.unit());
     }
 
-    private static Column rows(Column column, List<Integer> rows) {
-        if (rows.isEmpty()) {
-            return column;
+    private static Given values(Column column, String unit) {
+        return new Given.Values(column, column.rows() == 1, unit.isEmpty() ? null : unit);
+    }
+
+    /** Single rows, of quantities that share their unit. */
+    private Column rows(List<Row> rows) {
+        if (quantity(rows.get(0).quantity()).values() instanceof Column.Numbers) {
+            return new Column.Numbers(rows.stream().mapToDouble(this::number).toArray());
         }
-        if (column instanceof Column.Numbers numbers) {
-            return new Column.Numbers(
-                    rows.stream().mapToDouble(row -> numbers.values()[row]).toArray());
-        }
-        List<String> words = new ArrayList<>();
-        rows.forEach(row -> words.add(((Column.Texts) column).values().get(row)));
-        return new Column.Texts(List.copyOf(words));
+        List<@Nullable String> words = new ArrayList<>();
+        rows.forEach(row -> words.add(
+                ((Column.Texts) quantity(row.quantity()).values()).values().get(row.row())));
+        return new Column.Texts(words);
+    }
+
+    private double number(Row row) {
+        return ((Column.Numbers) quantity(row.quantity()).values()).values()[row.row()];
     }
 }

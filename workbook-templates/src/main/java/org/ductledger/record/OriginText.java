@@ -4,17 +4,22 @@ import java.util.ArrayList;
 import java.util.List;
 import org.ductledger.record.RecordedArgument.FromCall;
 import org.ductledger.record.RecordedArgument.FromQuantity;
+import org.ductledger.record.RecordedArgument.FromRows;
 import org.ductledger.record.RecordedArgument.Origin;
+import org.ductledger.record.RecordedArgument.Row;
 
 /**
- * An argument's origin in words: {@code call exit_mach}, {@code quantity gamma}, or, where only some rows of a quantity
- * are taken, {@code quantity contour_x rows 1x8 2x8 3}, which takes the first row eight times, then the second, then
- * the third once.
+ * An argument's origin in words: {@code call exit_mach}, {@code quantity gamma}, or, where only single rows are taken,
+ * {@code rows contour_x:1x8 contour_x:2x8 contour_x:3}, which takes the first row eight times, then the second, then the
+ * third once.
  */
 final class OriginText {
     private static final String CALL = "call ";
     private static final String QUANTITY = "quantity ";
-    private static final String ROWS = " rows ";
+    private static final String ROWS = "rows ";
+
+    /** As many rows as a sheet has: a file cannot ask for more memory than it could hold cells. */
+    private static final int MOST_ROWS = 1_048_576;
 
     private OriginText() {}
 
@@ -22,18 +27,20 @@ final class OriginText {
         if (origin instanceof FromCall call) {
             return CALL + call.id();
         }
-        FromQuantity from = (FromQuantity) origin;
-        return QUANTITY + from.quantity() + (from.rows().isEmpty() ? "" : ROWS + runs(from.rows()));
+        return origin instanceof FromRows from
+                ? ROWS + runs(from.rows())
+                : QUANTITY + ((FromQuantity) origin).quantity();
     }
 
-    private static String runs(List<Integer> rows) {
+    private static String runs(List<Row> rows) {
         List<String> runs = new ArrayList<>();
         for (int i = 0; i < rows.size(); ) {
+            Row row = rows.get(i);
             int next = i + 1;
-            while (next < rows.size() && rows.get(next).equals(rows.get(i))) {
+            while (next < rows.size() && rows.get(next).equals(row)) {
                 next++;
             }
-            runs.add((rows.get(i) + 1) + (next - i == 1 ? "" : "x" + (next - i)));
+            runs.add(row.quantity() + ":" + (row.row() + 1) + (next - i == 1 ? "" : "x" + (next - i)));
             i = next;
         }
         return String.join(" ", runs);
@@ -48,32 +55,32 @@ final class OriginText {
         if (text.startsWith(CALL)) {
             return new FromCall(text.substring(CALL.length()));
         }
-        if (!text.startsWith(QUANTITY)) {
-            throw new IllegalArgumentException("an origin begins with 'call' or 'quantity'");
+        if (text.startsWith(QUANTITY)) {
+            return new FromQuantity(text.substring(QUANTITY.length()));
         }
-        String rest = text.substring(QUANTITY.length());
-        int at = rest.indexOf(ROWS);
-        return at < 0
-                ? new FromQuantity(rest, List.of())
-                : new FromQuantity(rest.substring(0, at), rows(rest.substring(at + ROWS.length())));
+        if (text.startsWith(ROWS)) {
+            return new FromRows(rows(text.substring(ROWS.length())));
+        }
+        throw new IllegalArgumentException("an origin begins with 'call', 'quantity' or 'rows'");
     }
 
-    private static List<Integer> rows(String runs) {
-        List<Integer> rows = new ArrayList<>();
+    private static List<Row> rows(String runs) {
+        List<Row> rows = new ArrayList<>();
         for (String run : runs.split(" ", -1)) {
-            int times = run.indexOf('x');
-            int row = Integer.parseInt(times < 0 ? run : run.substring(0, times)) - 1;
+            int colon = run.lastIndexOf(':');
+            int times = run.indexOf('x', colon);
+            if (colon < 0) {
+                throw new IllegalArgumentException("a row reads 'quantity:row'");
+            }
+            int row = Integer.parseInt(run.substring(colon + 1, times < 0 ? run.length() : times)) - 1;
             int count = times < 0 ? 1 : Integer.parseInt(run.substring(times + 1));
             if (row < 0 || count < 1 || rows.size() + count > MOST_ROWS) {
                 throw new IllegalArgumentException("rows count from 1, and at most " + MOST_ROWS + " are taken");
             }
             for (int i = 0; i < count; i++) {
-                rows.add(row);
+                rows.add(new Row(run.substring(0, colon), row));
             }
         }
         return rows;
     }
-
-    /** As many rows as a sheet has: a file cannot ask for more memory than it could hold cells. */
-    private static final int MOST_ROWS = 1_048_576;
 }

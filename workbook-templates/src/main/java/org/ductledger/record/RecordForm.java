@@ -5,20 +5,24 @@ package org.ductledger.record;
  * word alone; headings and notes leave column A empty.
  *
  * <pre>
+ * A       B         C          D          E     F     G     H      I             J              K
  * record  key       text
- * input   name      role      cell      unit      kind   value   at the fill   state
- * fixed   name      cells     unit      kind      rows   value
- * call    id        function  revision  unit      kind   rows    value   live cells   filled cells   argument ...
- * value   of        first row value ...
+ * input   name      cell                  unit  kind  row   value  at the fill   state
+ * fixed   name      cells                 unit  kind  rows  value
+ * call    id        function   revision   unit  kind  rows  value  live cells    filled cells   arguments
+ * value   name, id                              row   value  value         value          value
  * </pre>
  *
  * <p>A value is a word, a number with seventeen digits, or {@code fault: kind: reason}. The values of a column stand in
  * {@code value} lines, several to a line, its rows counted from 1; the value of its own line is then empty. Several
- * {@code input} lines of one name are its rows. An argument is {@code name = origin @ cells}, see {@link OriginText}.
+ * {@code input} lines of one name are its rows, a {@code remark} line is an input that no call takes. The arguments of a call stand in one cell,
+ * a line each, as {@code name = origin @ cells}, see {@link OriginText}.
  */
 final class RecordForm {
     static final String SHEET = "Ledger";
     static final String RECORD = "record";
+    static final String INPUT = "input";
+    static final String REMARK = "remark";
     static final String FIXED = "fixed";
     static final String CALL = "call";
     static final String VALUE = "value";
@@ -34,11 +38,23 @@ final class RecordForm {
     static final String FAULT = "fault: ";
     static final String IS = " = ";
     static final String AT = " @ ";
+    static final String NEXT = "\n";
+
+    static final int NAME = 1;
+    static final int WHAT = 2;
+    static final int REVISION = 3;
+    static final int UNIT = 4;
+    static final int KIND = 5;
+    static final int ROWS = 6;
+    static final int VALUES = 7;
+    static final int AT_THE_FILL = 8;
+    static final int LIVE = 8;
+    static final int STATE = 9;
+    static final int FILLED = 9;
+    static final int ARGUMENTS = 10;
 
     /** Values in one {@code value} line. */
-    static final int VALUES_PER_LINE = 5;
-
-    static final int FIRST_ARGUMENT_COLUMN = 10;
+    static final int VALUES_PER_LINE = 4;
 
     private RecordForm() {}
 }

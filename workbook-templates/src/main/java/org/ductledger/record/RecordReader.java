@@ -39,8 +39,8 @@ public final class RecordReader {
 
     private void take(RecordLine line) throws UnreadableWorkbookException {
         switch (line.kind()) {
-            case RecordForm.RECORD -> head.put(line.required(1), line.required(2));
-            case "input", "remark" -> takeInput(line);
+            case RecordForm.RECORD -> head.put(line.required(RecordForm.NAME), line.required(RecordForm.WHAT));
+            case RecordForm.INPUT, RecordForm.REMARK -> takeInput(line);
             case RecordForm.FIXED -> takeFixed(line);
             case RecordForm.CALL -> takeCall(line);
             case RecordForm.VALUE -> takeValues(line);
@@ -52,64 +52,67 @@ public final class RecordReader {
     }
 
     private void takeInput(RecordLine line) throws UnreadableWorkbookException {
-        Role role = line.kind().equals("input") ? Role.INPUT : Role.REMARK;
-        String name = line.required(1);
+        Role role = line.kind().equals(RecordForm.INPUT) ? Role.INPUT : Role.REMARK;
+        String name = line.required(RecordForm.NAME);
         QuantityLines quantity = quantities.get(name);
         if (quantity == null) {
-            quantity = new QuantityLines(name, role, line.text(4), new ValueLines(line.isNumber(5)));
+            ValueLines values = new ValueLines(line.isNumber(RecordForm.KIND));
+            quantity = new QuantityLines(name, role, line.text(RecordForm.UNIT), values);
             quantities.put(name, quantity);
         }
         if (quantity.role != role) {
-            throw line.damaged(1, "a name that no other quantity has");
+            throw line.damaged(RecordForm.NAME, "a name that no other quantity has");
         }
-        quantity.cells.add(line.required(3));
-        quantity.values.add(line, 6);
+        if (line.count(RecordForm.ROWS) != quantity.values.size() + 1) {
+            throw line.damaged(RecordForm.ROWS, (quantity.values.size() + 1) + ", the next row");
+        }
+        quantity.cells.add(line.required(RecordForm.WHAT));
+        quantity.values.add(line, RecordForm.VALUES);
     }
 
     private void takeFixed(RecordLine line) throws UnreadableWorkbookException {
-        String name = line.required(1);
-        ValueLines values = new ValueLines(line.isNumber(4));
-        QuantityLines quantity = new QuantityLines(name, Role.FIXED, line.text(3), values);
-        if (!line.text(2).isEmpty()) {
-            quantity.cells.addAll(List.of(line.text(2).split(" ")));
+        String name = line.required(RecordForm.NAME);
+        ValueLines values = new ValueLines(line.isNumber(RecordForm.KIND));
+        QuantityLines quantity = new QuantityLines(name, Role.FIXED, line.text(RecordForm.UNIT), values);
+        if (!line.text(RecordForm.WHAT).isEmpty()) {
+            quantity.cells.addAll(List.of(line.text(RecordForm.WHAT).split(" ")));
         }
         if (quantities.put(name, quantity) != null) {
-            throw line.damaged(1, "a name that no other quantity has");
+            throw line.damaged(RecordForm.NAME, "a name that no other quantity has");
         }
-        takeOwnValue(line, name, values, 5);
+        takeOwnValue(line, name, values);
     }
 
     private void takeCall(RecordLine line) throws UnreadableWorkbookException {
-        String id = line.required(1);
-        ValueLines values = new ValueLines(line.isNumber(5));
+        String id = line.required(RecordForm.NAME);
+        ValueLines values = new ValueLines(line.isNumber(RecordForm.KIND));
         if (calls.put(id, new CallLine(line, values)) != null) {
-            throw line.damaged(1, "an id that no other call has");
+            throw line.damaged(RecordForm.NAME, "an id that no other call has");
         }
-        takeOwnValue(line, id, values, 6);
+        takeOwnValue(line, id, values);
     }
 
     /** The value of a single row stands in the line; a column's values follow in lines of their own. */
-    private void takeOwnValue(RecordLine line, String owner, ValueLines values, int rowsColumn)
-            throws UnreadableWorkbookException {
-        values.expect(line.count(rowsColumn), line, rowsColumn);
-        if (line.count(rowsColumn) == 1) {
-            values.add(line, rowsColumn + 1);
+    private void takeOwnValue(RecordLine line, String owner, ValueLines values) throws UnreadableWorkbookException {
+        int rows = line.count(RecordForm.ROWS);
+        values.expect(rows, line);
+        if (rows == 1) {
+            values.add(line, RecordForm.VALUES);
         } else if (columns.put(owner, values) != null) {
-            throw line.damaged(1, "a name that no other column has");
+            throw line.damaged(RecordForm.NAME, "a name that no other column has");
         }
     }
 
     private void takeValues(RecordLine line) throws UnreadableWorkbookException {
-        ValueLines values = columns.get(line.required(1));
+        ValueLines values = columns.get(line.required(RecordForm.NAME));
         if (values == null) {
-            throw line.damaged(1, "the name of a column in a line above");
+            throw line.damaged(RecordForm.NAME, "the name of a column in a line above");
         }
-        if (line.count(2) != values.size() + 1) {
-            throw line.damaged(2, "row " + (values.size() + 1) + ", the next one");
+        if (line.count(RecordForm.ROWS) != values.size() + 1) {
+            throw line.damaged(RecordForm.ROWS, (values.size() + 1) + ", the next row");
         }
-        for (int column = 3;
-                column < 3 + RecordForm.VALUES_PER_LINE && !line.text(column).isEmpty();
-                column++) {
+        int end = RecordForm.VALUES + RecordForm.VALUES_PER_LINE;
+        for (int column = RecordForm.VALUES; column < end && !line.text(column).isEmpty(); column++) {
             values.add(line, column);
         }
     }

@@ -14,17 +14,18 @@ public record RecordedArgument(String name, Origin origin, String cells) {
     /** Where an argument's values come from. */
     public sealed interface Origin {}
 
-    /**
-     * A quantity of the record.
-     *
-     * @param rows the rows of the quantity that are taken, from 0, one for each row of the call, any of them more than
-     *     once; empty means all in their order
-     */
-    public record FromQuantity(String quantity, List<Integer> rows) implements Origin {
-        public FromQuantity {
+    /** A quantity of the record, all its rows in their order. */
+    public record FromQuantity(String quantity) implements Origin {}
+
+    /** Single rows of quantities, one for each row of the call, any of them more than once. */
+    public record FromRows(List<Row> rows) implements Origin {
+        public FromRows {
             rows = List.copyOf(rows);
         }
     }
+
+    /** One row of a quantity, counted from 0. */
+    public record Row(String quantity, int row) {}
 
     /** The result of an earlier call. */
     public record FromCall(String id) implements Origin {}

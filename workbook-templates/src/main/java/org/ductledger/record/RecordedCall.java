@@ -29,9 +29,14 @@ public record RecordedCall(
         List<RecordedFault> faults) {
     /** Why one row, counted from 0, has no value. */
     public record RecordedFault(int row, FaultKind kind, String detail) {
-        /** What a filled cell shows in the place of the value: {@code no solution}. */
+        /** What a filled cell shows in the place of the value: {@code no solution}, {@code outside domain}. */
         public String inWords() {
-            return kind.label().replace('_', ' ');
+            return kind == FaultKind.BAD_REFERENCE ? "no value" : kind.label().replace('_', ' ');
+        }
+
+        /** The words of the cell, and the reason. */
+        public String whole() {
+            return inWords() + ": " + detail;
         }
     }
 

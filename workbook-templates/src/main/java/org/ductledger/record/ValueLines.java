@@ -16,17 +16,15 @@ final class ValueLines {
     private int expected = -1;
 
     private @Nullable RecordLine declaredBy;
-    private int declaredIn;
 
     ValueLines(boolean numbers) {
         this.numbers = numbers;
     }
 
-    /** Says how many there must be in the end, and which cell says so. */
-    void expect(int rows, RecordLine line, int column) {
+    /** Says how many there must be in the end, and which line says so. */
+    void expect(int rows, RecordLine line) {
         expected = rows;
         declaredBy = line;
-        declaredIn = column;
     }
 
     int size() {
@@ -71,7 +69,7 @@ final class ValueLines {
 
     Column column() throws UnreadableWorkbookException {
         if (declaredBy != null && values.size() != expected) {
-            throw declaredBy.damaged(declaredIn, values.size() + ", the number of its values in the record");
+            throw declaredBy.damaged(RecordForm.ROWS, values.size() + ", the number of its values in the record");
         }
         if (numbers) {
             return new Column.Numbers(values.stream()

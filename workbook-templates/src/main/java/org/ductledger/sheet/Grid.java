@@ -1,5 +1,7 @@
 package org.ductledger.sheet;
 
+import java.util.HashMap;
+import java.util.Map;
 import org.apache.poi.ss.util.CellRangeAddress;
 import org.apache.poi.ss.util.CellReference;
 import org.apache.poi.xssf.usermodel.XSSFCell;
@@ -8,13 +10,15 @@ import org.apache.poi.xssf.usermodel.XSSFSheet;
 
 /** A sheet in the making. Rows and columns count from 0 here; addresses are absolute and carry the sheet's name. */
 public final class Grid {
-    /** The widest a column may be, by the format. */
     private static final int POINTS_PER_LINE = 12;
 
     private static final int UNITS_PER_CHARACTER = 256;
+    private static final int DEFAULT_WIDTH = 8;
 
     private final XSSFSheet sheet;
     private final Styles styles;
+    /** In characters; the library looks each up in a list. */
+    private final Map<Integer, Integer> widths = new HashMap<>();
 
     Grid(XSSFSheet sheet, Styles styles) {
         this.sheet = sheet;
@@ -40,30 +44,26 @@ public final class Grid {
     }
 
     public void width(int column, int characters) {
+        widths.put(column, characters);
         sheet.setColumnWidth(column, characters * UNITS_PER_CHARACTER);
     }
 
-    public XSSFCell text(int row, int column, Look look, String text) {
-        XSSFCell cell = cell(row, column, look, NumberFormats.GENERAL);
-        cell.setCellValue(text);
-        return cell;
+    /** A text; where its look wraps, the row is made high enough for it. */
+    public void text(int row, int column, Look look, String text) {
+        cell(row, column, look, NumberFormats.GENERAL).setCellValue(text);
+        fit(row, column, column, look, text);
     }
 
-    public XSSFCell number(int row, int column, Look look, String format, double value) {
-        XSSFCell cell = cell(row, column, look, format);
-        cell.setCellValue(value);
-        return cell;
+    public void number(int row, int column, Look look, String format, double value) {
+        cell(row, column, look, format).setCellValue(value);
     }
 
     /** A formula, without a leading equals sign. */
-    public XSSFCell formula(int row, int column, Look look, String format, String formula) {
-        XSSFCell cell = cell(row, column, look, format);
-        cell.setCellFormula(formula);
-        return cell;
+    public void formula(int row, int column, Look look, String format, String formula) {
+        cell(row, column, look, format).setCellFormula(formula);
     }
 
-    /** An empty cell of that look. */
-    public XSSFCell cell(int row, int column, Look look, String format) {
+    private XSSFCell cell(int row, int column, Look look, String format) {
         XSSFCell cell = row(row).createCell(column);
         cell.setCellStyle(styles.of(look, format));
         return cell;
@@ -71,24 +71,26 @@ public final class Grid {
 
     /** A text over several columns, in as many lines as it needs by the widths of the columns. */
     public void across(int row, int first, int last, Look look, String text) {
-        text(row, first, look, text);
+        cell(row, first, look, NumberFormats.GENERAL).setCellValue(text);
         for (int column = first + 1; column <= last; column++) {
             cell(row, column, look, NumberFormats.GENERAL);
         }
         if (last > first) {
             sheet.addMergedRegion(new CellRangeAddress(row, row, first, last));
         }
-        fit(row, first, last, text);
+        fit(row, first, last, look, text);
     }
 
-    /** Makes a row high enough for a wrapped text between two columns; never lower than it is. */
-    public void fit(int row, int first, int last, String text) {
+    /** Makes a row high enough for a text between two columns; never lower than it is. */
+    private void fit(int row, int first, int last, Look look, String text) {
+        if (!look.wraps || text.isEmpty()) {
+            return;
+        }
         int width = 0;
         for (int column = first; column <= last; column++) {
-            width += sheet.getColumnWidth(column) / UNITS_PER_CHARACTER;
+            width += widths.getOrDefault(column, DEFAULT_WIDTH);
         }
-        int lines = Lines.needed(text, width);
-        float height = lines * POINTS_PER_LINE + 1.5f;
+        float height = Lines.needed(text, width, look.font.points) * POINTS_PER_LINE + 1.5f;
         XSSFRow made = row(row);
         made.setHeightInPoints(Math.max(made.getHeightInPoints(), height));
     }
@@ -110,6 +112,11 @@ public final class Grid {
     /** The address of a stretch of one column as in {@code Stations!$F$6:$F$54}. */
     public String range(int firstRow, int lastRow, int column) {
         return address(firstRow, column) + ":" + new CellReference(lastRow, column, true, true).formatAsString();
+    }
+
+    /** The address within this sheet, fixed: {@code $F$6}. */
+    public static String fixed(int row, int column) {
+        return new CellReference(row, column, true, true).formatAsString();
     }
 
     /** The address within this sheet, with a fixed column and a row that moves: {@code $F6}. */

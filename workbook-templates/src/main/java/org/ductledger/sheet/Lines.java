@@ -2,15 +2,25 @@ package org.ductledger.sheet;
 
 /** How many lines a wrapped text takes: heights are set here, since a headless machine cannot measure letters. */
 final class Lines {
-    /** Arial is narrower than the digits that column widths count, but words break early: near enough alike. */
-    private static final double CHARACTERS_PER_WIDTH = 1.05;
+    /** Widths count digits of the body's letters, of which Arial's average letter takes less. */
+    private static final double LETTERS_PER_WIDTH = 1.15;
+
+    /** What the indents of a cell take, in widths. */
+    private static final int INDENT = 2;
 
     private Lines() {}
 
-    static int needed(String text, int width) {
+    /**
+     * The lines of a text.
+     *
+     * @param width of the column, in digits of the body's letters
+     * @param points the size of the text's letters
+     */
+    static int needed(String text, int width, int points) {
+        double letters = (width - INDENT) * LETTERS_PER_WIDTH * Look.Font.PLAIN.points / points;
         int lines = 0;
         for (String paragraph : text.split("\n", -1)) {
-            lines += paragraphLines(paragraph, Math.max(1, (int) (width * CHARACTERS_PER_WIDTH)));
+            lines += paragraphLines(paragraph, Math.max(1, (int) letters));
         }
         return lines;
     }

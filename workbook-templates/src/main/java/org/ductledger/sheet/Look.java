@@ -9,7 +9,9 @@ public enum Look {
     HEADING(Font.BOLD, Palette.PAPER, Palette.DUCT, Edge.NONE, HorizontalAlignment.LEFT, false),
     COLUMN_HEAD(Font.BOLD, Palette.INK, Palette.BAND, Edge.UNDER, HorizontalAlignment.CENTER, true),
     TEXT(Font.PLAIN, Palette.INK, Palette.PAPER, Edge.NONE, HorizontalAlignment.LEFT, true),
-    STRONG(Font.BOLD, Palette.INK, Palette.PAPER, Edge.NONE, HorizontalAlignment.LEFT, true),
+    STRONG(Font.BOLD, Palette.INK, Palette.PAPER, Edge.NONE, HorizontalAlignment.LEFT, false),
+    /** A note that runs on over the cells beside it. */
+    ASIDE(Font.ITALIC, Palette.QUIET, Palette.PAPER, Edge.NONE, HorizontalAlignment.LEFT, false),
     NOTE(Font.ITALIC, Palette.QUIET, Palette.PAPER, Edge.NONE, HorizontalAlignment.LEFT, true),
     /** The user's to change: straw, in a full frame. */
     INPUT(Font.PLAIN, Palette.INK, Palette.STRAW, Edge.FRAME, HorizontalAlignment.RIGHT, false),
@@ -24,7 +26,7 @@ public enum Look {
     WORKING(Font.SMALL, Palette.QUIET, Palette.SLATE, Edge.DASHES, HorizontalAlignment.RIGHT, false),
     WORKING_HEAD(Font.SMALL, Palette.QUIET, Palette.SLATE, Edge.DASHES, HorizontalAlignment.CENTER, true),
     CENTRED(Font.PLAIN, Palette.INK, Palette.PAPER, Edge.NONE, HorizontalAlignment.CENTER, false),
-    RECORD(Font.SMALL, Palette.INK, Palette.PAPER, Edge.NONE, HorizontalAlignment.LEFT, false);
+    RECORD(Font.SMALL, Palette.INK, Palette.PAPER, Edge.UNDER, HorizontalAlignment.LEFT, true);
 
     /** The letters of a look. */
     enum Font {

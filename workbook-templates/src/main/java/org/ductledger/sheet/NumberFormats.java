@@ -5,7 +5,6 @@ public final class NumberFormats {
     public static final String GENERAL = "General";
     private static final String SCIENTIFIC = "0.00000E+00";
     private static final int DIGITS = 6;
-    private static final int MOST_DECIMALS = 8;
 
     private NumberFormats() {}
 
@@ -15,11 +14,10 @@ public final class NumberFormats {
             return "0.0000";
         }
         int exponent = (int) Math.floor(StrictMath.log10(magnitude));
-        int decimals = DIGITS - 1 - Math.max(exponent, -1);
         if (exponent < -2 || exponent >= 8) {
             return SCIENTIFIC;
         }
-        decimals = Math.min(Math.max(decimals, 0), MOST_DECIMALS);
+        int decimals = Math.max(DIGITS - 1 - exponent, 0);
         return decimals == 0 ? "0" : "0." + "0".repeat(decimals);
     }
 

@@ -30,18 +30,27 @@ public final class PageSetup {
     }
 
     /**
-     * Sets a sheet up.
+     * Sets a sheet up, as many pages high as it needs.
      *
      * @param area the ranges to print, as in {@code $A$1:$H$40}; each begins a page
      */
     public void apply(Grid grid, boolean landscape, String area) {
+        apply(grid, landscape, area, 0);
+    }
+
+    /** Sets a sheet up to print on a single page. */
+    public void applyToOnePage(Grid grid, boolean landscape, String area) {
+        apply(grid, landscape, area, 1);
+    }
+
+    private void apply(Grid grid, boolean landscape, String area, int pagesHigh) {
         XSSFSheet sheet = grid.poi();
         sheet.setFitToPage(true);
         XSSFPrintSetup setup = sheet.getPrintSetup();
         setup.setPaperSize(paper.code);
         setup.setLandscape(landscape);
         setup.setFitWidth((short) 1);
-        setup.setFitHeight((short) 0);
+        setup.setFitHeight((short) pagesHigh);
         sheet.setHorizontallyCenter(true);
         margins(sheet);
         sheet.getHeader().setLeft("&8" + title);

@@ -3,6 +3,7 @@ package org.ductledger.sheet;
 import java.util.HashMap;
 import java.util.Map;
 import org.apache.poi.ss.usermodel.FillPatternType;
+import org.apache.poi.ss.usermodel.HorizontalAlignment;
 import org.apache.poi.ss.usermodel.VerticalAlignment;
 import org.apache.poi.xssf.usermodel.XSSFCellStyle;
 import org.apache.poi.xssf.usermodel.XSSFFont;
@@ -37,7 +38,10 @@ final class Styles {
         XSSFCellStyle style = book.createCellStyle();
         style.setFont(font(look));
         style.setAlignment(look.align);
-        style.setVerticalAlignment(look.wraps ? VerticalAlignment.TOP : VerticalAlignment.CENTER);
+        style.setVerticalAlignment(VerticalAlignment.CENTER);
+        if (look.align != HorizontalAlignment.CENTER && look != Look.TITLE) {
+            style.setIndention((short) 1);
+        }
         style.setWrapText(look.wraps);
         style.setLocked(!look.isUnlocked());
         style.setDataFormat(book.createDataFormat().getFormat(format));
