@@ -31,7 +31,6 @@ public final class StandardCatalogue {
                 Fan.entries(),
                 Atmosphere.entries(),
                 Gases.entries(),
-                Diffuser.entries(),
                 Vessel.entries(),
                 FlowMeter.entries(),
                 Contour.entries(),

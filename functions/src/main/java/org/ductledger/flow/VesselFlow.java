@@ -72,10 +72,9 @@ final class VesselFlow {
 
     /** The factor F of the integral. */
     private static double factor(double pb, double gamma, double process) {
-        double choked = Isentropic.chokedMassFlowNumber(gamma);
         return isAdiabatic(process)
-                ? choked / Math.sqrt(gamma) * StrictMath.exp(-half(gamma) / gamma * StrictMath.log(pb))
-                : choked * Math.sqrt(gamma);
+                ? Choking.factorOverRootGamma(gamma) * StrictMath.exp(-half(gamma) / gamma * StrictMath.log(pb))
+                : Choking.factorOverRootGamma(gamma) * gamma;
     }
 
     private static double integrand(double mach, double k, double a) {

@@ -1,12 +1,9 @@
 package org.ductledger.template;
 
 import java.util.List;
-import org.ductledger.catalogue.Interval;
 
 /** A converging-diverging nozzle: its size for a duty, and what it does at the given back pressure. */
 final class NozzleSizing implements Template {
-    private static final Interval POSITIVE = Interval.above(0);
-
     @Override
     public String name() {
         return "nozzle_sizing";
@@ -57,108 +54,12 @@ final class NozzleSizing implements Template {
 
     @Override
     public List<TemplateInput> inputs() {
-        return List.of(
-                TemplateInput.number(
-                        "gamma",
-                        "Ratio of specific heats",
-                        "gamma",
-                        Interval.closed(1.05, 1.7),
-                        "cp/cv of the gas, constant",
-                        1.4,
-                        "1"),
-                TemplateInput.number(
-                        "gas_constant",
-                        "Specific gas constant",
-                        "R",
-                        POSITIVE,
-                        "universal gas constant over the molar mass",
-                        296.8,
-                        "J/(kg K)"),
-                TemplateInput.number(
-                        "p0", "Supply pressure", "p0", POSITIVE, "stagnation pressure, absolute", 700, "kPa"),
-                TemplateInput.number("t0", "Supply temperature", "T0", POSITIVE, "stagnation temperature", 300, "K"),
-                TemplateInput.number(
-                        "pb",
-                        "Back pressure",
-                        "pb",
-                        POSITIVE,
-                        "static pressure into which the nozzle discharges, absolute",
-                        380,
-                        "kPa"),
-                TemplateInput.number(
-                                "mass_flow", "Mass flow", "m", POSITIVE, "mass flow of the choked nozzle", 2, "kg/s")
-                        .oneOf("size"),
-                TemplateInput.number(
-                                "throat_diameter",
-                                "Throat diameter",
-                                "Dt",
-                                POSITIVE,
-                                "diameter of the round throat",
-                                40,
-                                "mm")
-                        .oneOf("size"),
-                TemplateInput.number(
-                                "exit_mach",
-                                "Design exit Mach number",
-                                "Me",
-                                Interval.openClosed(1, 20),
-                                "Mach number at the exit when the nozzle runs full",
-                                2.5,
-                                "1")
-                        .oneOf("exit"),
-                TemplateInput.number(
-                                "exit_pressure",
-                                "Design exit pressure",
-                                "pe",
-                                POSITIVE,
-                                "static pressure at the exit when the nozzle runs full, absolute",
-                                40,
-                                "kPa")
-                        .oneOf("exit"),
-                TemplateInput.number(
-                        "inlet_area_ratio",
-                        "Inlet over throat area",
-                        "Ai/At",
-                        Interval.openClosed(1, 1000),
-                        "area of the inlet over the area of the throat",
-                        4,
-                        "1"),
-                TemplateInput.column(
-                        "contour_x",
-                        "Contour point, place",
-                        "x",
-                        Interval.anyNumber(),
-                        "inlet, two between, throat at 0, two between, exit; each further on than the one before",
-                        "mm",
-                        -80,
-                        -50,
-                        -20,
-                        0,
-                        35,
-                        75,
-                        130),
-                TemplateInput.column(
-                        "contour_opening",
-                        "Contour point, opening",
-                        "h",
-                        Interval.open(0, 1),
-                        "(D - Dt) over that of the nearer end, at the two points between inlet and throat and the two"
-                                + " between throat and exit",
-                        "1",
-                        0.55,
-                        0.12,
-                        0.35,
-                        0.75),
-                TemplateInput.remark(
-                        "project",
-                        "Project",
-                        "what the calculation belongs to",
-                        "Nitrogen blowdown stand 2, Skarrow Bay yard"),
-                TemplateInput.remark(
-                        "calculation_number", "Calculation no.", "the number in your register", "SB2-NZ-014"),
-                TemplateInput.remark("revision", "Revision", "of this calculation", "A"),
-                TemplateInput.remark("prepared_by", "Prepared by", "name and date", ""),
-                TemplateInput.remark("checked_by", "Checked by", "name and date", ""),
-                TemplateInput.remark("approved_by", "Approved by", "name and date", ""));
+        return NozzleInputs.all();
+    }
+
+    @Override
+    public void write(Draft draft) {
+        new NozzleCalculation(draft).write();
+        new NozzleStations(draft).write();
     }
 }

@@ -23,4 +23,7 @@ public interface Template {
 
     /** What a user must heed before anything is built or pressurised, a sentence each. */
     List<String> cautions();
+
+    /** Writes the calculation for the inputs that were chosen. */
+    void write(Draft draft);
 }

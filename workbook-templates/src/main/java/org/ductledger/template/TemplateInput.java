@@ -19,7 +19,7 @@ import org.ductledger.ledger.Given;
  * @param choices the admissible words of a choice
  * @param preset the value taken where none is given
  * @param group the name of the alternatives it belongs to, of which exactly one is given; empty where it stands alone
- * @param rows the number of values it takes: 1, or more for a column
+ * @param rowNames what each value of a column is called; empty for a single value
  */
 public record TemplateInput(
         String name,
@@ -32,7 +32,7 @@ public record TemplateInput(
         List<String> choices,
         Given.Values preset,
         String group,
-        int rows) {
+        List<String> rowNames) {
     /** What may be given for an input. */
     public enum Kind {
         NUMBER,
@@ -42,6 +42,7 @@ public record TemplateInput(
 
     public TemplateInput {
         choices = List.copyOf(choices);
+        rowNames = List.copyOf(rowNames);
     }
 
     /** A number, with its default in the unit given. */
@@ -50,22 +51,23 @@ public record TemplateInput(
         Unit coherent = Unit.named(unit).coherent();
         Given.Values values = new Given.Values(new Column.Numbers(preset), true, unit);
         return new TemplateInput(
-                name, label, symbol, meaning, Kind.NUMBER, coherent, interval, List.of(), values, "", 1);
+                name, label, symbol, meaning, Kind.NUMBER, coherent, interval, List.of(), values, "", List.of());
     }
 
-    /** A column of numbers, as long as its default. */
+    /** A column of numbers, one for each of the names, with its default in the unit given. */
     public static TemplateInput column(
             String name,
             String label,
             String symbol,
             Interval interval,
             String meaning,
+            List<String> rowNames,
             String unit,
             double... preset) {
         Unit coherent = Unit.named(unit).coherent();
         Given.Values values = new Given.Values(new Column.Numbers(preset), false, unit);
         return new TemplateInput(
-                name, label, symbol, meaning, Kind.NUMBER, coherent, interval, List.of(), values, "", preset.length);
+                name, label, symbol, meaning, Kind.NUMBER, coherent, interval, List.of(), values, "", rowNames);
     }
 
     /** One of a few words, the first of them the default. */
@@ -81,13 +83,23 @@ public record TemplateInput(
                 List.of(choices),
                 words(choices[0]),
                 "",
-                1);
+                List.of());
     }
 
     /** A text for the front sheet, which no call takes; it may be blank. */
     public static TemplateInput remark(String name, String label, String meaning, String preset) {
         return new TemplateInput(
-                name, label, "", meaning, Kind.REMARK, Unit.ONE, Interval.anyNumber(), List.of(), words(preset), "", 1);
+                name,
+                label,
+                "",
+                meaning,
+                Kind.REMARK,
+                Unit.ONE,
+                Interval.anyNumber(),
+                List.of(),
+                words(preset),
+                "",
+                List.of());
     }
 
     private static Given.Values words(String word) {
@@ -97,7 +109,12 @@ public record TemplateInput(
     /** The same input as one of several alternatives, of which exactly one is given. */
     public TemplateInput oneOf(String alternatives) {
         return new TemplateInput(
-                name, label, symbol, meaning, kind, coherent, interval, choices, preset, alternatives, rows);
+                name, label, symbol, meaning, kind, coherent, interval, choices, preset, alternatives, rowNames);
+    }
+
+    /** The number of values it takes: 1, or more for a column. */
+    public int rows() {
+        return Math.max(1, rowNames.size());
     }
 
     /** The unit in which a workbook of the given system shows it. */
@@ -108,7 +125,7 @@ public record TemplateInput(
     /** What is required, in words and in the unit given. */
     public String requirement(Unit inUnit) {
         return switch (kind) {
-            case NUMBER -> (rows == 1 ? "" : rows + " values, each ") + interval.inWords(inUnit);
+            case NUMBER -> (rows() == 1 ? "" : rows() + " values, each ") + interval.inWords(inUnit);
             case WORD -> "one of " + String.join(", ", choices);
             case REMARK -> "a text, which may be blank";
         };

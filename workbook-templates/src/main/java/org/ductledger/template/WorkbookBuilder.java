@@ -1,15 +1,17 @@
 package org.ductledger.template;
 
-import java.io.ByteArrayOutputStream;
-import java.io.IOException;
-import java.io.UncheckedIOException;
+import java.util.ArrayList;
+import java.util.List;
 import java.util.Map;
-import org.apache.poi.xssf.usermodel.XSSFRow;
-import org.apache.poi.xssf.usermodel.XSSFSheet;
-import org.apache.poi.xssf.usermodel.XSSFWorkbook;
-import org.ductledger.ledger.Column;
+import org.apache.poi.xssf.usermodel.XSSFFormulaEvaluator;
 import org.ductledger.ledger.Evaluator;
 import org.ductledger.ledger.Given;
+import org.ductledger.ledger.LedgerRefusedException;
+import org.ductledger.record.RecordWriter;
+import org.ductledger.sheet.Book;
+import org.ductledger.sheet.PageSetup;
+import org.ductledger.sheet.PageSetup.Paper;
+import org.ductledger.sheet.StableFile;
 
 /** Makes workbooks of templates. Thread-safe. */
 public final class WorkbookBuilder {
@@ -30,35 +32,54 @@ public final class WorkbookBuilder {
      */
     public byte[] build(Template template, Map<String, Given.Values> inputs, UnitSystem units)
             throws InputsRefusedException {
-        Inputs chosen = InputReader.read(template, inputs, units);
-        try (XSSFWorkbook book = new XSSFWorkbook();
-                ByteArrayOutputStream out = new ByteArrayOutputStream()) {
-            XSSFSheet sheet = book.createSheet("Inputs");
-            sheet.createRow(0)
-                    .createCell(0)
-                    .setCellValue(template.title() + ", library "
-                            + evaluator.catalogue().version());
-            for (TemplateInput input : template.inputs()) {
-                if (chosen.has(input.name())) {
-                    list(sheet.createRow(sheet.getLastRowNum() + 1), input, chosen.get(input.name()));
-                }
-            }
-            book.write(out);
-            return out.toByteArray();
-        } catch (IOException e) {
-            throw new UncheckedIOException(e);
+        Draft draft = new Draft(evaluator.catalogue(), InputReader.read(template, inputs, units));
+        template.write(draft);
+        Filled filled = fill(template, draft);
+        if (!filled.problems().isEmpty()) {
+            throw new InputsRefusedException(filled.problems());
+        }
+        return write(template, filled);
+    }
+
+    private Filled fill(Template template, Draft draft) {
+        try {
+            return Filled.of(draft, evaluator.evaluate(DraftRecord.ledger(template, draft)));
+        } catch (LedgerRefusedException e) {
+            throw new IllegalStateException("the template " + template.name() + " writes an unsound ledger", e);
         }
     }
 
-    private static void list(XSSFRow row, TemplateInput input, Given.Values values) {
-        row.createCell(0).setCellValue(input.label());
-        for (int i = 0; i < values.column().rows(); i++) {
-            if (values.column() instanceof Column.Numbers numbers) {
-                row.createCell(i + 1).setCellValue(numbers.values()[i]);
-            } else {
-                row.createCell(i + 1)
-                        .setCellValue(((Column.Texts) values.column()).values().get(i));
-            }
+    private static byte[] write(Template template, Filled filled) {
+        Book book = new Book();
+        Paper paper = filled.draft().inputs().units() == UnitSystem.US ? Paper.LETTER : Paper.A4;
+        PageSetup page = new PageSetup(paper, template.title());
+        Layout layout = new Layout(template, filled, book, page, new Places());
+        declare(layout);
+        InputsSheet.write(layout, book.sheet(InputsSheet.NAME));
+        ResultsSheet.write(layout, book.sheet(ResultsSheet.NAME));
+        List<Runnable> plots = new ArrayList<>();
+        for (Table table : filled.draft().tables()) {
+            plots.add(TableSheet.write(layout, table, book.sheet(table.sheet())));
         }
+        FrontSheet.write(layout, book.sheet(FrontSheet.NAME));
+        RecordWriter.write(book, page, DraftRecord.of(template, filled, layout.places()));
+        SourcesSheet.write(layout, book.sheet(SourcesSheet.NAME));
+        book.lock();
+        XSSFFormulaEvaluator.evaluateAllFormulaCells(book.poi());
+        plots.forEach(Runnable::run);
+        book.poi().setForceFormulaRecalculation(true);
+        return StableFile.of(book.poi(), template.title());
+    }
+
+    /** Makes the sheets in their order, and the names that formulas lean on before their cells are written. */
+    private static void declare(Layout layout) {
+        Book book = layout.book();
+        book.sheet(FrontSheet.NAME);
+        book.sheet(InputsSheet.NAME);
+        book.sheet(ResultsSheet.NAME);
+        layout.draft().tables().forEach(table -> book.sheet(table.sheet()));
+        RecordWriter.declare(book);
+        ResultsSheet.declare(book);
+        book.sheet(SourcesSheet.NAME);
     }
 }
