@@ -147,7 +147,7 @@ final class Isentropic {
 
     /** M from T0/T = (head + tail)^(w0 + w1): by exponential less one where T0/T is near 1. */
     private static double machFromPower(double head, double tail, double w0, double w1, double gamma) {
-        double exponent = w0 * StrictMath.log(head);
+        double exponent = Math.max(0, w0 * StrictMath.log(head));
         if (exponent < SMALL_EXPONENT) {
             return Math.sqrt(StrictMath.expm1(exponent) / h(gamma));
         }

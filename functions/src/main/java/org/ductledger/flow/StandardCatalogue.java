@@ -31,6 +31,7 @@ public final class StandardCatalogue {
                 Fan.entries(),
                 Atmosphere.entries(),
                 Gases.entries(),
+                Diffuser.entries(),
                 Vessel.entries(),
                 FlowMeter.entries(),
                 Contour.entries(),

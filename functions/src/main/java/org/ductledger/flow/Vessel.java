@@ -24,7 +24,7 @@ final class Vessel {
 
     /** Divided step by step, so that no quotient of two overflows arises. */
     static double timeConstant(double volume, double area, double t0, double gamma, double gasConstant) {
-        return volume / area / Choking.factor(gamma) / Math.sqrt(gasConstant) / Math.sqrt(t0);
+        return volume / area / Isentropic.chokedMassFlowNumber(gamma) / Math.sqrt(gasConstant) / Math.sqrt(t0);
     }
 
     private static double timeConstantByVolume(double volume, double area, double t0, double gamma, double r) {
@@ -74,7 +74,8 @@ final class Vessel {
         double critical = StrictMath.exp(-VesselFlow.logCritical(gamma));
         double choked = Math.min(p, critical) - Math.min(pInitial, critical);
         double unchoked = jet(Math.max(pInitial, critical), gamma) - jet(Math.max(p, critical), gamma);
-        double time = timeConstant * (choked + gamma * Choking.factorOverRootGamma(gamma) * unchoked);
+        double factor = Isentropic.chokedMassFlowNumber(gamma) * Math.sqrt(gamma);
+        double time = timeConstant * (choked + factor * unchoked);
         return process == VesselFlow.ADIABATIC ? time / gamma : time;
     }
 

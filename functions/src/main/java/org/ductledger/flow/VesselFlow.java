@@ -72,9 +72,10 @@ final class VesselFlow {
 
     /** The factor F of the integral. */
     private static double factor(double pb, double gamma, double process) {
+        double choked = Isentropic.chokedMassFlowNumber(gamma);
         return isAdiabatic(process)
-                ? Choking.factorOverRootGamma(gamma) * StrictMath.exp(-half(gamma) / gamma * StrictMath.log(pb))
-                : Choking.factorOverRootGamma(gamma) * gamma;
+                ? choked / Math.sqrt(gamma) * StrictMath.exp(-half(gamma) / gamma * StrictMath.log(pb))
+                : choked * Math.sqrt(gamma);
     }
 
     private static double integrand(double mach, double k, double a) {

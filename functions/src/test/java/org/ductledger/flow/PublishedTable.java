@@ -105,7 +105,12 @@ final class PublishedTable {
 
         /** The number of {@code NAME=number unit} in the inputs, its unit left off. */
         double number(String name) {
-            return Double.parseDouble(input(name, "[-+0-9.eE]+"));
+            return Double.parseDouble(decimal(name));
+        }
+
+        /** The same number as written. */
+        String decimal(String name) {
+            return input(name, "[-+0-9.eE]+");
         }
 
         /** The word of {@code NAME=word} in the inputs. */
