@@ -29,7 +29,8 @@ public final class EntryBuilder {
 
     private @Nullable CellForm cellForm;
 
-    EntryBuilder(Family family, String name) {
+    /** Begins the entry of one of the family's functions. */
+    public EntryBuilder(Family family, String name) {
         this.family = family;
         this.name = name;
     }

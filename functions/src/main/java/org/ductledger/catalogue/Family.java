@@ -6,9 +6,4 @@ package org.ductledger.catalogue;
  * @param name lower snake case: {@code isentropic}
  * @param title one line
  */
-public record Family(String name, String title) {
-    /** Begins the entry of one of this family's functions. */
-    public EntryBuilder entry(String functionName) {
-        return new EntryBuilder(this, functionName);
-    }
-}
+public record Family(String name, String title) {}

@@ -6,7 +6,6 @@ import static org.ductledger.flow.Arguments.MACH;
 import java.util.List;
 import org.ductledger.catalogue.Argument;
 import org.ductledger.catalogue.EntryBuilder;
-import org.ductledger.catalogue.Family;
 import org.ductledger.catalogue.FaultKind;
 import org.ductledger.catalogue.FunctionEntry;
 import org.ductledger.catalogue.Interval;
@@ -15,7 +14,7 @@ import org.ductledger.catalogue.Source;
 
 /** What a small relative change of area does to a steady isentropic flow. */
 final class AreaRule {
-    private static final Family FAMILY = new Family("area_rule", "What a small change of area does");
+    private static final Chapter FAMILY = new Chapter("area_rule", "What a small change of area does");
     private static final Source AREA_CHANGE = Sources.SHAPIRO.at("chapter 4, effects of area change");
     private static final Argument AREA_CHANGE_ARGUMENT =
             Argument.number("area_change", "dA/A", "1", Interval.anyNumber(), "relative change of area along the flow");

@@ -3,7 +3,6 @@ package org.ductledger.flow;
 import java.util.List;
 import org.ductledger.catalogue.Argument;
 import org.ductledger.catalogue.CellForm;
-import org.ductledger.catalogue.Family;
 import org.ductledger.catalogue.FunctionEntry;
 import org.ductledger.catalogue.Interval;
 import org.ductledger.catalogue.Kernel;
@@ -14,7 +13,7 @@ import org.ductledger.catalogue.Source;
  * constants. Seven layers, in each of which the molecular-scale temperature is linear in the geopotential altitude.
  */
 final class Atmosphere {
-    private static final Family FAMILY = new Family("atmosphere", "U.S. Standard Atmosphere 1976");
+    private static final Chapter FAMILY = new Chapter("atmosphere", "U.S. Standard Atmosphere 1976");
 
     /** Above this geopotential altitude, in m, the composition changes and the standard goes on otherwise. */
     private static final double TOP = 84_852;

@@ -8,7 +8,6 @@ import static org.ductledger.flow.Arguments.STATION_SIDE;
 import java.util.List;
 import org.ductledger.catalogue.Argument;
 import org.ductledger.catalogue.CellForm;
-import org.ductledger.catalogue.Family;
 import org.ductledger.catalogue.FaultKind;
 import org.ductledger.catalogue.FunctionEntry;
 import org.ductledger.catalogue.Interval;
@@ -21,7 +20,7 @@ import org.ductledger.catalogue.Source;
  * exit, so that one contour serves every throat and every area ratio.
  */
 final class Contour {
-    private static final Family FAMILY = new Family("contour", "Nozzle contour of cones between points");
+    private static final Chapter FAMILY = new Chapter("contour", "Nozzle contour of cones between points");
 
     private Contour() {}
 

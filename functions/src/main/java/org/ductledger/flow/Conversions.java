@@ -10,7 +10,6 @@ import static org.ductledger.flow.Arguments.THROAT_AREA;
 import java.util.List;
 import org.ductledger.catalogue.Argument;
 import org.ductledger.catalogue.EntryBuilder;
-import org.ductledger.catalogue.Family;
 import org.ductledger.catalogue.FaultKind;
 import org.ductledger.catalogue.FunctionEntry;
 import org.ductledger.catalogue.Interval;
@@ -19,7 +18,7 @@ import org.ductledger.catalogue.Source;
 
 /** The way between the ratios of the catalogue and the quantities of a rig: pressures, areas, flows and forces. */
 final class Conversions {
-    private static final Family FAMILY = new Family("conversion", "Between ratios and quantities");
+    private static final Chapter FAMILY = new Chapter("conversion", "Between ratios and quantities");
 
     private Conversions() {}
 

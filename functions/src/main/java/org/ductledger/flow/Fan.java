@@ -7,7 +7,6 @@ import static org.ductledger.flow.Arguments.SUPERSONIC_MACH1;
 import java.util.List;
 import org.ductledger.catalogue.Argument;
 import org.ductledger.catalogue.EntryBuilder;
-import org.ductledger.catalogue.Family;
 import org.ductledger.catalogue.FaultKind;
 import org.ductledger.catalogue.FunctionEntry;
 import org.ductledger.catalogue.Interval;
@@ -17,7 +16,7 @@ import org.ductledger.numeric.Degrees;
 
 /** The centred expansion of Prandtl and Meyer, and isentropic compression, its reverse. Angles in degrees. */
 final class Fan {
-    private static final Family FAMILY = new Family("fan", "Prandtl-Meyer expansion and isentropic turning");
+    private static final Chapter FAMILY = new Chapter("fan", "Prandtl-Meyer expansion and isentropic turning");
 
     /** From here on M^2 - 1 is M^2 to the last digit. */
     private static final double HYPERSONIC = 1e9;

@@ -8,7 +8,6 @@ import static org.ductledger.flow.Arguments.T0;
 
 import java.util.List;
 import org.ductledger.catalogue.Argument;
-import org.ductledger.catalogue.Family;
 import org.ductledger.catalogue.FunctionEntry;
 import org.ductledger.catalogue.Interval;
 import org.ductledger.catalogue.Kernel;
@@ -16,7 +15,7 @@ import org.ductledger.catalogue.Source;
 
 /** Gas meters: the critical flow Venturi nozzle, and the expansibility of nozzles and Venturi tubes. */
 final class FlowMeter {
-    private static final Family FAMILY = new Family("meter", "Gas flow meters: critical nozzles, expansibility");
+    private static final Chapter FAMILY = new Chapter("meter", "Gas flow meters: critical nozzles, expansibility");
 
     private FlowMeter() {}
 

@@ -14,7 +14,6 @@ import java.util.List;
 import java.util.Map;
 import org.ductledger.catalogue.Argument;
 import org.ductledger.catalogue.CellForm;
-import org.ductledger.catalogue.Family;
 import org.ductledger.catalogue.FaultKind;
 import org.ductledger.catalogue.FunctionEntry;
 import org.ductledger.catalogue.Interval;
@@ -23,7 +22,8 @@ import org.ductledger.catalogue.Source;
 
 /** Speeds, densities and mass flows of a perfect gas, with their dimensions. */
 final class FlowRates {
-    private static final Family FAMILY = new Family("dimensional", "Speeds, densities and mass flows of a perfect gas");
+    private static final Chapter FAMILY =
+            new Chapter("dimensional", "Speeds, densities and mass flows of a perfect gas");
 
     private FlowRates() {}
 

@@ -6,7 +6,6 @@ import java.util.List;
 import org.ductledger.catalogue.Argument;
 import org.ductledger.catalogue.CellForm;
 import org.ductledger.catalogue.EntryBuilder;
-import org.ductledger.catalogue.Family;
 import org.ductledger.catalogue.FaultKind;
 import org.ductledger.catalogue.FunctionEntry;
 import org.ductledger.catalogue.Interval;
@@ -15,7 +14,7 @@ import org.ductledger.catalogue.Source;
 
 /** Named gases as ideal gases of fixed composition: molar mass, gas constant, heat capacity and viscosity. */
 final class Gases {
-    private static final Family FAMILY = new Family("gas", "Named gases: constants, heat capacity, viscosity");
+    private static final Chapter FAMILY = new Chapter("gas", "Named gases: constants, heat capacity, viscosity");
 
     /** The universal gas constant of NASA/TP-2002-211556, J/(mol K). */
     static final double UNIVERSAL = 8.314510;

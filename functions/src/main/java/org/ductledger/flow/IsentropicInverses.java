@@ -9,7 +9,6 @@ import java.util.Map;
 import org.ductledger.catalogue.Argument;
 import org.ductledger.catalogue.CellForm;
 import org.ductledger.catalogue.EntryBuilder;
-import org.ductledger.catalogue.Family;
 import org.ductledger.catalogue.FaultKind;
 import org.ductledger.catalogue.FunctionEntry;
 import org.ductledger.catalogue.Interval;
@@ -19,7 +18,7 @@ import org.ductledger.catalogue.Source;
 
 /** The Mach number from each of the isentropic ratios and numbers. */
 final class IsentropicInverses {
-    private static final Family FAMILY = IsentropicRatios.FAMILY;
+    private static final Chapter FAMILY = IsentropicRatios.FAMILY;
     private static final Interval SHARE = Interval.openClosed(0, 1);
     private static final Interval POSITIVE = Interval.atLeast(0);
 

@@ -5,7 +5,6 @@ import static org.ductledger.flow.Arguments.MACH;
 
 import java.util.List;
 import org.ductledger.catalogue.CellForm;
-import org.ductledger.catalogue.Family;
 import org.ductledger.catalogue.FunctionEntry;
 import org.ductledger.catalogue.Interval;
 import org.ductledger.catalogue.Kernel;
@@ -15,7 +14,7 @@ import org.ductledger.numeric.StagnationPower;
 
 /** The isentropic ratios and numbers that the Mach number gives. */
 final class IsentropicRatios {
-    static final Family FAMILY = new Family("isentropic", "Isentropic flow of a perfect gas");
+    static final Chapter FAMILY = new Chapter("isentropic", "Isentropic flow of a perfect gas");
 
     private static final Source USEFUL_RATIOS = Sources.NACA_1135.at("Continuous one-dimensional flow, useful ratios");
     private static final Source STREAM_TUBE = Sources.NACA_1135.at("eq. (80)");

@@ -5,7 +5,6 @@ import static org.ductledger.flow.Arguments.SUPERSONIC_MACH1;
 
 import java.util.List;
 import java.util.stream.Stream;
-import org.ductledger.catalogue.Family;
 import org.ductledger.catalogue.FunctionEntry;
 import org.ductledger.catalogue.Interval;
 import org.ductledger.catalogue.Kernel;
@@ -19,7 +18,7 @@ import org.ductledger.numeric.Power;
  * M2^2 = (1 + c x)/(1 + b x).
  */
 final class NormalShock {
-    static final Family FAMILY = new Family("shock", "Normal shock in a perfect gas");
+    static final Chapter FAMILY = new Chapter("shock", "Normal shock in a perfect gas");
 
     /** From here on M1^2 leaves no room for products in a double. */
     static final double HUGE_MACH = 1e150;

@@ -9,7 +9,6 @@ import java.util.List;
 import java.util.stream.Stream;
 import org.ductledger.catalogue.Argument;
 import org.ductledger.catalogue.EntryBuilder;
-import org.ductledger.catalogue.Family;
 import org.ductledger.catalogue.FaultKind;
 import org.ductledger.catalogue.FunctionEntry;
 import org.ductledger.catalogue.Interval;
@@ -18,7 +17,7 @@ import org.ductledger.catalogue.Numbers;
 
 /** A nozzle between a supply and a back pressure: its regimes, its exit, its shock and its stations. */
 final class Nozzle {
-    static final Family FAMILY = new Family("nozzle", "Converging-diverging nozzle at a back pressure");
+    static final Chapter FAMILY = new Chapter("nozzle", "Converging-diverging nozzle at a back pressure");
 
     static final Argument PB_OVER_P0 = Argument.number(
             "pb_over_p0",

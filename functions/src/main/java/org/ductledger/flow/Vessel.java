@@ -9,7 +9,6 @@ import java.util.List;
 import org.ductledger.catalogue.Argument;
 import org.ductledger.catalogue.CellForm;
 import org.ductledger.catalogue.EntryBuilder;
-import org.ductledger.catalogue.Family;
 import org.ductledger.catalogue.FaultKind;
 import org.ductledger.catalogue.FunctionEntry;
 import org.ductledger.catalogue.Interval;
@@ -18,7 +17,7 @@ import org.ductledger.catalogue.Source;
 
 /** A rigid vessel that empties to a constant back pressure, or is filled from a constant supply. */
 final class Vessel {
-    private static final Family FAMILY = new Family("vessel", "Blowdown and filling of a rigid vessel");
+    private static final Chapter FAMILY = new Chapter("vessel", "Blowdown and filling of a rigid vessel");
 
     private Vessel() {}
 

@@ -31,7 +31,7 @@ final class CallCheck {
         this.refusals = refusals;
     }
 
-    private Plan.@Nullable Input refuse(FaultKind kind, @Nullable String argument, String detail) {
+    private Step.@Nullable Input refuse(FaultKind kind, @Nullable String argument, String detail) {
         refusals.add(new Refusal(kind, place, argument, detail));
         return null;
     }
@@ -49,7 +49,7 @@ final class CallCheck {
         }
     }
 
-    Plan.@Nullable Input missing(Argument argument) {
+    Step.@Nullable Input missing(Argument argument) {
         String unit = argument.isText() || argument.unit().isOne() ? "" : " (in " + argument.unit() + ")";
         return refuse(
                 FaultKind.MISSING_ARGUMENT,
@@ -58,7 +58,7 @@ final class CallCheck {
                         + ", and it is not given");
     }
 
-    Plan.@Nullable Input values(Given.Values given, Argument argument) {
+    Step.@Nullable Input values(Given.Values given, Argument argument) {
         String name = argument.name();
         boolean text = given.column() instanceof Column.Texts;
         if (argument.isText() != text) {
@@ -73,10 +73,10 @@ final class CallCheck {
             return refuse(FaultKind.UNKNOWN_UNIT, name, name + " is a word, which has no unit; got " + given.unit());
         }
         Unit unit = unit(given.unit(), argument.unit(), name, name);
-        return unit == null ? null : new Plan.Input(argument, given, unit, null);
+        return unit == null ? null : new Step.Input(argument, given, unit, null);
     }
 
-    Plan.@Nullable Input noEarlierCall(String id, Argument argument, boolean laterOne) {
+    Step.@Nullable Input noEarlierCall(String id, Argument argument, boolean laterOne) {
         String refers = argument.name() + " refers to " + id;
         return refuse(
                 FaultKind.BAD_REFERENCE,
@@ -87,12 +87,12 @@ final class CallCheck {
                         : refers + ", but no call has that id");
     }
 
-    Plan.@Nullable Input reference(Plan.Step earlier, Argument argument) {
+    Step.@Nullable Input reference(Step earlier, Argument argument) {
         Result gives = earlier.entry().result();
         boolean fits =
                 gives.choices().equals(argument.choices()) && gives.unit().measuresSameKindAs(argument.unit());
         if (fits) {
-            return new Plan.Input(argument, null, argument.unit(), earlier);
+            return new Step.Input(argument, null, argument.unit(), earlier);
         }
         return refuse(
                 FaultKind.BAD_REFERENCE,

@@ -32,7 +32,7 @@ public final class Evaluator {
         Map<String, double[]> done = new HashMap<>();
         List<Outcome> wanted = new ArrayList<>();
         Set<String> want = Set.copyOf(ledger.want());
-        for (Plan.Step step : Plan.of(ledger, catalogue)) {
+        for (Step step : Plan.of(ledger, catalogue)) {
             Faults faults = new Faults(step);
             double[] result = evaluate(step, done, faults);
             done.put(step.call().id(), result);
@@ -45,7 +45,7 @@ public final class Evaluator {
     }
 
     /** The result in coherent units, as later calls take it; NaN in the rows with a fault. */
-    private static double[] evaluate(Plan.Step step, Map<String, double[]> done, Faults faults) {
+    private static double[] evaluate(Step step, Map<String, double[]> done, Faults faults) {
         double[][] arguments = new double[step.inputs().size()][];
         for (int i = 0; i < arguments.length; i++) {
             arguments[i] = coherent(step.inputs().get(i), done);
@@ -53,7 +53,7 @@ public final class Evaluator {
         return new Rows(step, arguments, faults).compute();
     }
 
-    private static double[] coherent(Plan.Input input, Map<String, double[]> done) {
+    private static double[] coherent(Step.Input input, Map<String, double[]> done) {
         Given.Values values = input.values();
         if (values == null) {
             return earlier(input.earlier(), done);
@@ -69,7 +69,7 @@ public final class Evaluator {
                 : Arrays.stream(given).map(input.unit()::toCoherent).toArray();
     }
 
-    private static double[] earlier(Plan.@Nullable Step step, Map<String, double[]> done) {
+    private static double[] earlier(@Nullable Step step, Map<String, double[]> done) {
         double[] result = step == null ? null : done.get(step.call().id());
         if (result == null) {
             throw new IllegalStateException("the plan let a reference through that has no result");
@@ -82,7 +82,7 @@ public final class Evaluator {
         return place < 0 ? Double.NaN : place;
     }
 
-    private static Column shown(Plan.Step step, double[] result, Faults faults) {
+    private static Column shown(Step step, double[] result, Faults faults) {
         if (step.entry().result().isText()) {
             return words(step.entry().result().choices(), result);
         }

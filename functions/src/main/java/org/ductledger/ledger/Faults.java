@@ -14,11 +14,11 @@ import org.jspecify.annotations.Nullable;
 
 /** Gathers the faults of one call's rows: the first one found for a row stays. */
 final class Faults {
-    private final Plan.Step step;
+    private final Step step;
     private final BitSet faulty = new BitSet();
     private final List<Fault> found = new ArrayList<>();
 
-    Faults(Plan.Step step) {
+    Faults(Step step) {
         this.step = step;
     }
 
@@ -50,8 +50,8 @@ final class Faults {
     }
 
     private Fault outside(int place, double coherent, int row) {
-        Plan.Input input = step.inputs().get(place);
-        Plan.Step earlier = input.earlier();
+        Step.Input input = step.inputs().get(place);
+        Step earlier = input.earlier();
         String name = input.argument().name();
         if (earlier != null && Double.isNaN(coherent)) {
             String id = earlier.call().id();
@@ -69,7 +69,7 @@ final class Faults {
     }
 
     /** What stands in the ledger for this row, as it was given; a referred value in its coherent unit. */
-    private static @Nullable Object given(Plan.Input input, double coherent, int row) {
+    private static @Nullable Object given(Step.Input input, double coherent, int row) {
         Given.Values values = input.values();
         if (values != null) {
             int own = values.column().rows() == 1 ? 0 : row;
@@ -80,9 +80,9 @@ final class Faults {
         return input.argument().isText() ? input.argument().choices().get((int) coherent) : (Object) coherent;
     }
 
-    private static String shown(Plan.Input input, @Nullable Object given) {
+    private static String shown(Step.Input input, @Nullable Object given) {
         String text = given instanceof Double x ? Numbers.brief(x) + suffix(input.unit()) : "'" + given + "'";
-        Plan.Step earlier = input.earlier();
+        Step earlier = input.earlier();
         return earlier == null ? text : text + " from " + earlier.call().id();
     }
 
@@ -139,7 +139,7 @@ final class Faults {
 
     private Fault broken(int row, Condition condition, double[] arguments) {
         int place = step.entry().place(condition.argument());
-        Plan.Input input = step.inputs().get(place);
+        Step.Input input = step.inputs().get(place);
         Object given = given(input, arguments[place], row);
         String inCoherent = input.unit().isCoherent()
                 ? ""

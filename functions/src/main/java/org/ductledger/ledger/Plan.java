@@ -16,16 +16,6 @@ import org.jspecify.annotations.Nullable;
 
 /** Checks a ledger as a whole before anything is computed: names, units, references, lengths. */
 final class Plan {
-    /** An argument as the evaluator takes it: given values with their unit, or an earlier step. */
-    record Input(
-            Argument argument,
-            Given.@Nullable Values values,
-            Unit unit,
-            @Nullable Step earlier) {}
-
-    /** A call that is known to be sound; it is spread where every argument is a single value. */
-    record Step(Call call, FunctionEntry entry, List<Input> inputs, Unit unit, int rows, boolean spread) {}
-
     private final Catalogue catalogue;
     private final List<Refusal> refusals = new ArrayList<>();
     /** The calls so far; an unsound one maps to null, so that what leans on it is not blamed again. */
@@ -82,9 +72,9 @@ final class Plan {
         int before = refusals.size();
         CallCheck check = new CallCheck(call, place, entry, refusals);
         check.refuseUnknownArguments();
-        List<Input> inputs = new ArrayList<>();
+        List<Step.Input> inputs = new ArrayList<>();
         for (Argument argument : entry.arguments()) {
-            Input input = input(call, argument, check);
+            Step.Input input = input(call, argument, check);
             if (input != null) {
                 inputs.add(input);
             }
@@ -97,7 +87,7 @@ final class Plan {
         return new Step(call, entry, List.copyOf(inputs), unit, Math.max(rows, 1), rows < 0);
     }
 
-    private @Nullable Input input(Call call, Argument argument, CallCheck check) {
+    private Step.@Nullable Input input(Call call, Argument argument, CallCheck check) {
         Given given = call.arguments().get(argument.name());
         if (given == null) {
             return check.missing(argument);
@@ -114,9 +104,9 @@ final class Plan {
     }
 
     /** The common number of rows; -1 where every argument is a single value. */
-    private int rows(int place, List<Input> inputs) {
+    private int rows(int place, List<Step.Input> inputs) {
         Map<Integer, String> lengths = new LinkedHashMap<>();
-        for (Input input : inputs) {
+        for (Step.Input input : inputs) {
             Given.Values values = input.values();
             Step earlier = input.earlier();
             if (values != null && !values.spread()) {

@@ -15,7 +15,7 @@ final class Rows {
 
     private static final int BLOCK_ROWS = 8_192;
 
-    private final Plan.Step step;
+    private final Step step;
     private final double[][] arguments;
     private final Faults faults;
     private final double[] result;
@@ -26,7 +26,7 @@ final class Rows {
      * @param arguments a column each in coherent units: one value, or one a row
      * @param faults takes the rows without a result
      */
-    Rows(Plan.Step step, double[][] arguments, Faults faults) {
+    Rows(Step step, double[][] arguments, Faults faults) {
         this.step = step;
         this.arguments = arguments;
         this.faults = faults;

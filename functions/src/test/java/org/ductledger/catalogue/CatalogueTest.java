@@ -9,8 +9,7 @@ import org.junit.jupiter.api.Test;
 
 class CatalogueTest {
     private static FunctionEntry entry(String name) {
-        return new Family("made_up", "Made up for a test")
-                .entry(name)
+        return new EntryBuilder(new Family("made_up", "Made up for a test"), name)
                 .title("The number itself")
                 .formula("x")
                 .takes(Argument.number("x", "x", "1", Interval.anyNumber(), "a number"))

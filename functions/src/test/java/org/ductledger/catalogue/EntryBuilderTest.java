@@ -15,8 +15,7 @@ class EntryBuilderTest {
     private static final Source SOURCE = new Source("A. Body", "A Standard", 2001, "eq. (1)");
 
     private static EntryBuilder whole(String name) {
-        return new Family("made_up", "Made up for a test")
-                .entry(name)
+        return new EntryBuilder(new Family("made_up", "Made up for a test"), name)
                 .title("A signed length")
                 .formula("y = +-x^2")
                 .takes(X, SIDE)
@@ -48,9 +47,7 @@ class EntryBuilderTest {
     void anEntryThatSaysTooLittleIsRefused() {
         String message = assertThrows(
                         IllegalStateException.class,
-                        () -> new Family("made_up", "Made up")
-                                .entry("bare_entry")
-                                .build())
+                        () -> new EntryBuilder(new Family("made_up", "Made up"), "bare_entry").build())
                 .getMessage();
         assertEquals("bare_entry lacks a result", message);
         refused("a title and a formula", b -> b.title(""));

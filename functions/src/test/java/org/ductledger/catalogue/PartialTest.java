@@ -47,8 +47,7 @@ class PartialTest {
 
     @Test
     void anEntryGivesItsExactDerivativeOrElseANumericOne() {
-        FunctionEntry entry = new Family("made_up", "Made up for a test")
-                .entry("scaled_cube")
+        FunctionEntry entry = new EntryBuilder(new Family("made_up", "Made up for a test"), "scaled_cube")
                 .title("A scaled cube")
                 .formula("y = a x^3")
                 .takes(

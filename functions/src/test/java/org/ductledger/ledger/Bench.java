@@ -5,6 +5,7 @@ import java.util.List;
 import java.util.Map;
 import org.ductledger.catalogue.Argument;
 import org.ductledger.catalogue.Catalogue;
+import org.ductledger.catalogue.EntryBuilder;
 import org.ductledger.catalogue.Family;
 import org.ductledger.catalogue.FaultKind;
 import org.ductledger.catalogue.FunctionEntry;
@@ -25,7 +26,7 @@ final class Bench {
             Argument.number("t", "T", "K", Interval.above(0), "an absolute temperature");
 
     /** length * other, negative on the left; asks for {@code other <= length}. */
-    private static final FunctionEntry SIGNED_AREA = FAMILY.entry("signed_area")
+    private static final FunctionEntry SIGNED_AREA = new EntryBuilder(FAMILY, "signed_area")
             .title("A signed area")
             .formula("A = +-l o")
             .takes(LENGTH, OTHER, SIDE)
@@ -37,7 +38,7 @@ final class Bench {
             .cell("{length}*{other}")
             .build();
 
-    private static final FunctionEntry EDGE_OF = FAMILY.entry("edge_of")
+    private static final FunctionEntry EDGE_OF = new EntryBuilder(FAMILY, "edge_of")
             .title("The edge of a square")
             .formula("l = sqrt(A)")
             .takes(AREA)
@@ -48,7 +49,7 @@ final class Bench {
             .cell("SQRT({area})")
             .build();
 
-    private static final FunctionEntry SIDE_OF = FAMILY.entry("side_of")
+    private static final FunctionEntry SIDE_OF = new EntryBuilder(FAMILY, "side_of")
             .title("The side on which a length ends")
             .formula("right from 1 m on")
             .takes(LENGTH)
@@ -59,7 +60,7 @@ final class Bench {
             .cell("IF({length}<1,\"left\",\"right\")")
             .build();
 
-    private static final FunctionEntry HAND_OF = FAMILY.entry("hand_of")
+    private static final FunctionEntry HAND_OF = new EntryBuilder(FAMILY, "hand_of")
             .title("A hand by a word of its own")
             .formula("1 to port, 2 to starboard")
             .takes(HAND)
@@ -70,7 +71,7 @@ final class Bench {
             .cell("IF({hand}=\"port\",1,2)")
             .build();
 
-    private static final FunctionEntry WARMER = FAMILY.entry("warmer_by_half")
+    private static final FunctionEntry WARMER = new EntryBuilder(FAMILY, "warmer_by_half")
             .title("A temperature half as high again")
             .formula("1.5 T")
             .takes(TEMPERATURE)
@@ -81,7 +82,7 @@ final class Bench {
             .cell("1.5*{t}")
             .build();
 
-    private static final FunctionEntry LOST = FAMILY.entry("lost_iteration")
+    private static final FunctionEntry LOST = new EntryBuilder(FAMILY, "lost_iteration")
             .title("An iteration that is lost below 1 m and overflows above 2 m")
             .formula("l")
             .takes(LENGTH)

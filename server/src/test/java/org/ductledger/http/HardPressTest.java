@@ -20,6 +20,7 @@ import java.util.concurrent.Executors;
 import java.util.concurrent.Future;
 import org.ductledger.catalogue.Argument;
 import org.ductledger.catalogue.Catalogue;
+import org.ductledger.catalogue.EntryBuilder;
 import org.ductledger.catalogue.Family;
 import org.ductledger.catalogue.FunctionEntry;
 import org.ductledger.catalogue.Interval;
@@ -238,8 +239,7 @@ class HardPressTest {
     }
 
     private static Catalogue catalogue(Kernel.Of1 kernel) {
-        FunctionEntry entry = new Family("test", "Kernels for tests")
-                .entry("test_kernel")
+        FunctionEntry entry = new EntryBuilder(new Family("test", "Kernels for tests"), "test_kernel")
                 .title("A kernel for a test")
                 .formula("y = x")
                 .takes(Argument.number("mach", "M", "1", Interval.atLeast(0), "a number"))
