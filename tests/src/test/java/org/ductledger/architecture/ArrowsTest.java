@@ -45,24 +45,36 @@ final class ArrowsTest {
             .resideOutsideOfPackages("..flow..", "..ledger..", "..numeric..");
 
     @ArchTest
-    static final ArchRule EVALUATOR_KNOWS_NO_FAMILY =
-            noClasses().that().resideInAPackage("..ledger..").should().dependOnClassesThat().resideInAnyPackage(
-                    "..flow..", "..numeric..");
+    static final ArchRule EVALUATOR_KNOWS_NO_FAMILY = noClasses()
+            .that()
+            .resideInAPackage("..ledger..")
+            .should()
+            .dependOnClassesThat()
+            .resideInAnyPackage("..flow..", "..numeric..");
 
     @ArchTest
-    static final ArchRule FUNCTIONS_KNOW_NO_FACE =
-            noClasses().that().resideInAnyPackage(FUNCTIONS).should().dependOnClassesThat().resideInAnyPackage(
-                    "com.fasterxml..", "io.undertow..", "org.apache.poi..", "picocli..");
+    static final ArchRule FUNCTIONS_KNOW_NO_FACE = noClasses()
+            .that()
+            .resideInAnyPackage(FUNCTIONS)
+            .should()
+            .dependOnClassesThat()
+            .resideInAnyPackage("com.fasterxml..", "io.undertow..", "org.apache.poi..", "picocli..");
 
     @ArchTest
-    static final ArchRule BATCH_KNOWS_NO_HTTP =
-            noClasses().that().resideInAPackage("..batch..").should().dependOnClassesThat().resideInAnyPackage(
-                    "io.undertow..", "..http..", "..command..");
+    static final ArchRule BATCH_KNOWS_NO_HTTP = noClasses()
+            .that()
+            .resideInAPackage("..batch..")
+            .should()
+            .dependOnClassesThat()
+            .resideInAnyPackage("io.undertow..", "..http..", "..command..");
 
     @ArchTest
-    static final ArchRule WORKBOOKS_KNOW_NO_HTTP_AND_NO_JSON =
-            noClasses().that().resideInAnyPackage(WORKBOOKS).should().dependOnClassesThat().resideInAnyPackage(
-                    "io.undertow..", "com.fasterxml..");
+    static final ArchRule WORKBOOKS_KNOW_NO_HTTP_AND_NO_JSON = noClasses()
+            .that()
+            .resideInAnyPackage(WORKBOOKS)
+            .should()
+            .dependOnClassesThat()
+            .resideInAnyPackage("io.undertow..", "com.fasterxml..");
 
     @ArchTest
     static final ArchRule NO_CIRCLE_OF_PACKAGES =
