@@ -19,7 +19,8 @@ final class LauncherTest {
     private record Ended(int code, String out, String err) {}
 
     private static Ended run(Path folder, String... arguments) throws IOException, InterruptedException {
-        List<String> command = new ArrayList<>(List.of(TOP.resolve("server/ductledger").toString()));
+        List<String> command =
+                new ArrayList<>(List.of(TOP.resolve("server/ductledger").toString()));
         command.addAll(List.of(arguments));
         Path out = Files.createTempFile(folder, "out", ".txt");
         Path err = Files.createTempFile(folder, "err", ".txt");

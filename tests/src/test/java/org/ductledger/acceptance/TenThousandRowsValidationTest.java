@@ -29,10 +29,10 @@ final class TenThousandRowsValidationTest {
         /** A/A* as a textbook writes it, in logarithms, against which the solver closes the bracket. */
         double mach() {
             double exponent = (gamma + 1) / (2 * (gamma - 1));
-            UnivariateFunction residual = mach -> exponent
-                            * Math.log(2 / (gamma + 1) * (1 + (gamma - 1) / 2 * mach * mach))
-                    - Math.log(mach)
-                    - Math.log(areaRatio);
+            UnivariateFunction residual =
+                    mach -> exponent * Math.log(2 / (gamma + 1) * (1 + (gamma - 1) / 2 * mach * mach))
+                            - Math.log(mach)
+                            - Math.log(areaRatio);
             boolean subsonic = branch.equals("subsonic");
             return new BracketingNthOrderBrentSolver(1e-15, 1e-15, 5)
                     .solve(1000, residual, subsonic ? 1e-6 : 1, subsonic ? 1 : 1000);
@@ -45,7 +45,12 @@ final class TenThousandRowsValidationTest {
         Path table = folder.resolve("areas.csv");
         StringBuilder csv = new StringBuilder("area_ratio,gamma,branch\n");
         for (Row row : rows) {
-            csv.append(row.areaRatio).append(',').append(row.gamma).append(',').append(row.branch).append('\n');
+            csv.append(row.areaRatio)
+                    .append(',')
+                    .append(row.gamma)
+                    .append(',')
+                    .append(row.branch)
+                    .append('\n');
         }
         Files.writeString(table, csv);
 
