@@ -6,7 +6,6 @@ import static org.ductledger.flow.Arguments.MACH;
 import java.util.List;
 import org.ductledger.catalogue.Argument;
 import org.ductledger.catalogue.CellForm;
-import org.ductledger.catalogue.Family;
 import org.ductledger.catalogue.FunctionEntry;
 import org.ductledger.catalogue.Interval;
 import org.ductledger.catalogue.Kernel;
@@ -14,7 +13,7 @@ import org.ductledger.catalogue.Source;
 
 /** Supersonic tunnels, inlets and diffusers: how far the passage may close, and what pressure comes back. */
 final class Diffuser {
-    private static final Family FAMILY = new Family("diffuser", "Tunnel start, inlet contraction, pressure recovery");
+    private static final Chapter FAMILY = new Chapter("diffuser", "Tunnel start, inlet contraction, pressure recovery");
 
     private Diffuser() {}
 
