@@ -3,7 +3,6 @@ package org.ductledger.http;
 import io.undertow.server.HttpServerExchange;
 import io.undertow.util.StatusCodes;
 import java.io.IOException;
-import java.io.OutputStream;
 import java.util.List;
 import org.ductledger.batch.DocumentRefusedException;
 import org.ductledger.batch.LedgerReader;
@@ -32,9 +31,10 @@ final class EvaluateEndpoint implements Endpoint {
         Ledger ledger = reader.read(bodies.read(exchange, Answers.JSON));
         List<Outcome> outcomes = evaluate(ledger);
         Answers.type(exchange, Answers.JSON);
-        try (OutputStream out = exchange.getOutputStream()) {
-            ResultsWriter.write(evaluator.catalogue().version(), outcomes, out);
-        }
+        AnswerStream out = new AnswerStream(exchange);
+        ResultsWriter.write(evaluator.catalogue().version(), outcomes, out);
+        // Closed only here: what goes wrong on the way must not end as a whole answer.
+        out.close();
     }
 
     private List<Outcome> evaluate(Ledger ledger) throws ProblemException {

@@ -147,6 +147,26 @@ class EvaluateTest {
         assertTrue(errors.get(1).get("detail").asText().contains("near it: t_over_t0"), response.body());
     }
 
+    /** An answer that is cut short must not look whole: a short one has its length, a long one its last chunk. */
+    @Test
+    void everyAnswerTellsItsEnd() throws IOException, InterruptedException {
+        for (int rows : new int[] {1, 1_000, 100_000}) {
+            String column = "[" + "0,".repeat(rows - 1) + "0]";
+            String body = GOOD.replace("[0,2]", column);
+            String answer = service.raw("POST /v1/evaluate HTTP/1.1\r\nHost: 127.0.0.1:" + service.port()
+                    + "\r\nContent-Type: application/json\r\nConnection: close\r\nContent-Length: " + body.length()
+                    + "\r\n\r\n" + body);
+            String head = answer.substring(0, answer.indexOf("\r\n\r\n") + 2);
+            assertTrue(
+                    rows < 100_000
+                            ? head.contains("\r\nContent-Length: ")
+                            : head.contains("\r\nTransfer-Encoding: chunked\r\n") && answer.endsWith("\r\n0\r\n\r\n"),
+                    head);
+            JsonNode values = json(service.post("/v1/evaluate", body)).at("/results/0/values");
+            assertEquals(rows, values.size());
+        }
+    }
+
     @Test
     void refusesWhatIsNoJsonByItsType() throws IOException, InterruptedException {
         for (String type : new String[] {"text/plain", "application/json; charset=latin1", "text/json", "a;;b"}) {
