@@ -25,7 +25,7 @@ class EntryWriterTest {
                 {"name":"gamma","symbol":"gamma","meaning":"ratio of the specific heats cp/cv, constant",\
                 "unit":"1","interval":{"above":1.0,"at_most":100.0},"sensitivity":"exact"}""", json.get("arguments").get(1).toString());
         assertEquals(
-                "{\"symbol\":\"T/T0\",\"unit\":\"1\",\"interval\":{\"above\":0.0,\"at_most\":1.0}}",
+                "{\"symbol\":\"T/T0\",\"unit\":\"1\",\"interval\":{\"at_least\":0.0,\"at_most\":1.0}}",
                 json.get("result").toString());
         assertEquals(
                 "NACA Report 1135: Equations, Tables, and Charts for Compressible Flow",

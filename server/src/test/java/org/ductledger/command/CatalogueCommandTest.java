@@ -51,7 +51,8 @@ class CatalogueCommandTest {
     void everyExampleShownRuns() {
         for (FunctionEntry entry : StandardCatalogue.get().entries()) {
             String text = CommandRun.of("catalogue", entry.name()).out().replaceAll("\\s+", " ");
-            String command = text.substring(text.indexOf("ductledger evaluate ") + 11, text.indexOf(" gives "));
+            int start = text.indexOf("ductledger evaluate ") + "ductledger ".length();
+            String command = text.substring(start, text.indexOf(" gives ", start));
             CommandRun run = CommandRun.of(command.strip().split(" ", -1));
             assertEquals(0, run.code(), command + "\n" + run.err() + run.out());
         }

@@ -36,4 +36,14 @@ class ProgramTest {
         assertEquals(0, help.code());
         assertTrue(help.out().startsWith("Usage: ductledger " + command), help.out());
     }
+
+    @Test
+    void theDemoShowsTheWholeWay() {
+        CommandRun run = CommandRun.of("demo");
+        assertEquals(0, run.code(), run.out() + run.err());
+        assertTrue(run.out().contains("\"faults\":[]"), run.out());
+        assertTrue(run.out().contains("nozzle_sizing.xlsx"), run.out());
+        assertTrue(run.out().contains("\"clean\":true"), run.out());
+        assertEquals("", run.err());
+    }
 }

@@ -1,5 +1,6 @@
 package org.ductledger.command;
 
+import static org.junit.jupiter.api.Assertions.assertArrayEquals;
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertFalse;
 import static org.junit.jupiter.api.Assertions.assertTrue;
@@ -21,6 +22,7 @@ class WorkbookCommandsTest {
     void buildsOnlyWhereThereIsNoFileUnlessForced() throws IOException {
         Path file = folder.resolve("nozzle.xlsx");
         assertEquals(new CommandRun(0, file + "\n", ""), build(file));
+        byte[] first = Files.readAllBytes(file);
         CommandRun again = build(file);
         assertEquals(2, again.code());
         assertTrue(again.err().contains("is there already"), again.err());
@@ -31,6 +33,7 @@ class WorkbookCommandsTest {
                 0,
                 CommandRun.of("build", "nozzle_sizing", "-o", file.toString(), "--force")
                         .code());
+        assertArrayEquals(first, Files.readAllBytes(file), "the same inputs give the same bytes");
         try (Stream<Path> files = Files.list(folder)) {
             assertEquals(List.of(file), files.toList(), "nothing is left beside it");
         }
@@ -63,6 +66,22 @@ class WorkbookCommandsTest {
         refused(3, "p0 requires", input("{\"p0\": -1}", file));
         refused(3, "nothing requires", input("{\"nothing\": 1}", file));
         assertFalse(Files.exists(file));
+    }
+
+    @Test
+    void auditsFilesAndSaysWhichCouldNotBeRead() throws IOException {
+        Path file = folder.resolve("nozzle.xlsx");
+        assertEquals(0, build(file).code());
+        CommandRun clean = CommandRun.of("audit", file.toString());
+        assertEquals(0, clean.code(), clean.out() + clean.err());
+        assertTrue(clean.out().contains("no difference"), clean.out());
+
+        Path noZip = Files.writeString(folder.resolve("no.xlsx"), "no zip");
+        CommandRun mixed = CommandRun.of("audit", file.toString(), noZip.toString(), "none.xlsx", "--json");
+        assertEquals(3, mixed.code());
+        assertTrue(mixed.out().contains("\"clean\":true"), mixed.out());
+        assertTrue(mixed.err().contains(noZip + ": the file must be an XLSX workbook"), mixed.err());
+        assertTrue(mixed.err().contains("there is no file none.xlsx"), mixed.err());
     }
 
     private static CommandRun build(Path file, String... options) {

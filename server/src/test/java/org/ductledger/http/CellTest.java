@@ -41,7 +41,7 @@ class CellTest {
         t_over_t0?mach=1e400&gamma=1.4        | fault: mach must be a number within the range of a double (about 4.9e-324 to 1.8e308), got '1e400'
         t_over_t0?mach                        | fault: a query is made of name=value, got 'mach'
         t_over_t0?mach=%ff                    | fault: a query is encoded in UTF-8, got '%ff'
-        t_over_t?mach=2                       | fault: no function is named t_over_t; near it: t_over_t0
+        no_such_function_here?mach=2          | fault: no function is named no_such_function_here
         """)
     void answersTheNumberOrTheFaultInWords(String call, String text) throws IOException {
         // By a bare socket: a client's library would not send a malformed query.

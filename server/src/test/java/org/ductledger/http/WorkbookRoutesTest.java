@@ -3,6 +3,7 @@ package org.ductledger.http;
 import static java.nio.charset.StandardCharsets.UTF_8;
 import static org.ductledger.http.EvaluateTest.assertProblem;
 import static org.ductledger.http.LiveService.json;
+import static org.junit.jupiter.api.Assertions.assertArrayEquals;
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertFalse;
 import static org.junit.jupiter.api.Assertions.assertTrue;
@@ -38,6 +39,10 @@ class WorkbookRoutesTest {
         try (XSSFWorkbook book = new XSSFWorkbook(new ByteArrayInputStream(response.body()))) {
             assertTrue(book.getSheetIndex("Inputs") >= 0);
         }
+        assertArrayEquals(
+                response.body(),
+                service.postForBytes(PATH, "{\"p0\": {\"value\": 9, \"unit\": \"bar\"}}")
+                        .body());
         assertFalse(Arrays.equals(
                 response.body(),
                 service.postForBytes(PATH + "?units=us", "{\"p0\": {\"value\": 9, \"unit\": \"bar\"}}")
@@ -59,6 +64,15 @@ class WorkbookRoutesTest {
         assertProblem(service.post(PATH + "?unit=us", "{}"), 400);
         assertProblem(service.post(PATH + "?units=us&units=us", "{}"), 400);
         assertProblem(service.post("/v1/workbooks/nozzle_size", "{}"), 404);
+    }
+
+    @Test
+    void auditsWhatItBuilt() throws IOException, InterruptedException {
+        byte[] workbook = service.postForBytes(PATH, "{}").body();
+        JsonNode report = json(service.post("/v1/audit", Answers.XLSX, workbook));
+        assertEquals("nozzle_sizing", report.get("template").asText());
+        assertTrue(report.get("clean").asBoolean(), report::toString);
+        assertTrue(report.get("calls").asInt() > 10 && report.get("cells").asInt() > 50, report::toString);
     }
 
     @Test
