@@ -77,11 +77,14 @@ final class DemoCommand implements Callable<Integer> {
 
     private void showNextSteps() {
         out.println("   open the workbook, change an input, and see its checks speak");
-        out.println(
-                "   ductledger serve                            the service, on port " + DuctledgerServer.DEFAULT_PORT);
-        out.println("   ductledger catalogue                        every function and template");
-        out.println("   ductledger build " + TEMPLATE + " -o my.xlsx    a workbook of your own");
-        out.println("   ductledger --help                           the rest");
+        showCommand("serve", "the service, on port " + DuctledgerServer.DEFAULT_PORT);
+        showCommand("catalogue", "every function and template");
+        showCommand("build " + TEMPLATE + " -o my.xlsx", "a workbook of your own");
+        showCommand("--help", "the rest");
+    }
+
+    private void showCommand(String command, String what) {
+        out.printf("   ductledger %-36s%s%n", command, what);
     }
 
     private static byte[] resource(String name) throws IOException {
