@@ -69,6 +69,13 @@ public final class Grid {
         return cell;
     }
 
+    /** The heads of columns, from one column on. */
+    public void heads(int row, int firstColumn, Look look, String... heads) {
+        for (int i = 0; i < heads.length; i++) {
+            text(row, firstColumn + i, look, heads[i]);
+        }
+    }
+
     /** A text over several columns, in as many lines as it needs by the widths of the columns. */
     public void across(int row, int first, int last, Look look, String text) {
         cell(row, first, look, NumberFormats.GENERAL).setCellValue(text);

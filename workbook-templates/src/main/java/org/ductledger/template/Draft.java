@@ -82,9 +82,9 @@ public final class Draft {
         return constant(name, new Column.Numbers(value));
     }
 
-    /** A word that stands in the formulas. */
-    public Term word(String word) {
-        return constant("word_" + word, new Column.Texts(List.of(word)));
+    /** A constant word that stands in the formulas. */
+    public Term word(String name, String word) {
+        return constant(name, new Column.Texts(List.of(word)));
     }
 
     private Term constant(String name, Column values) {
@@ -131,6 +131,10 @@ public final class Draft {
 
     /** A column of a table: numbers or words that the template gives, one a row. */
     public Term column(Table table, String name, String label, Column values) {
+        if (values.rows() != table.rows()) {
+            throw new IllegalArgumentException(
+                    name + " has " + values.rows() + " values; the table has " + table.rows() + " rows");
+        }
         table.add(new Table.FixedColumn(name, label));
         return constant(name, values);
     }

@@ -20,6 +20,19 @@ import org.ductledger.template.TemplateInput.Kind;
 final class InputsSheet {
     static final String NAME = "Inputs";
 
+    private static final String[] HEADS = {
+        "Quantity",
+        "Symbol",
+        "Value",
+        "Unit",
+        "Admissible",
+        "Now",
+        "Factor to SI",
+        "SI value",
+        "SI unit",
+        "Name of the SI cell",
+        "Meaning"
+    };
     private static final String IN_RANGE = "in range";
     private static final String HOLDS = "holds";
     private static final int LABEL = 0;
@@ -48,24 +61,9 @@ final class InputsSheet {
     }
 
     private void write() {
-        grid.widths(25, 8, 14, 14, 28, 14, 14, 14, 11, 20, 50);
+        grid.widths(26, 8, 14, 15, 33, 14, 16, 14, 11, 20, 60);
         Layout.head(grid, "Inputs", MEANING);
-        String[] heads = {
-            "Quantity",
-            "Symbol",
-            "Value",
-            "Unit",
-            "Admissible",
-            "Now",
-            "Factor to SI",
-            "SI value",
-            "SI unit",
-            "Name of the SI cell",
-            "Meaning"
-        };
-        for (int i = 0; i < heads.length; i++) {
-            grid.text(row, i, Look.COLUMN_HEAD, heads[i]);
-        }
+        grid.heads(row, LABEL, Look.COLUMN_HEAD, HEADS);
         row++;
         int first = row;
         for (TemplateInput input : layout.template().inputs()) {
@@ -82,32 +80,38 @@ final class InputsSheet {
     private void write(TemplateInput input) {
         List<String> shown = new ArrayList<>();
         List<String> held = new ArrayList<>();
-        Unit unit = input.unit(layout.draft().inputs().units());
-        Column values = layout.draft().inputs().get(input.name()).column();
         for (int i = 0; i < input.rows(); i++) {
-            String rowName =
-                    input.rowNames().isEmpty() ? "" : ": " + input.rowNames().get(i);
-            grid.text(row, LABEL, Look.TEXT, input.label() + rowName);
-            grid.text(row, SYMBOL, Look.CENTRED, input.symbol());
-            grid.text(row, UNIT, Look.TEXT, Layout.unit(unit));
-            grid.text(row, RANGE, Look.TEXT, requirement(input, unit));
-            grid.text(row, MEANING, Look.NOTE, i == 0 ? input.meaning() + alternatives(input) : "");
-            if (values instanceof Column.Numbers numbers) {
-                writeNumber(input, unit, numbers.values()[i]);
-            } else {
-                writeWord(input, String.valueOf(((Column.Texts) values).values().get(i)));
-            }
-            String name = input.rowNames().isEmpty()
-                    ? Cells.name(layout.draft(), input.name())
-                    : Cells.name(layout.draft(), input.name(), i);
-            grid.text(row, CELL_NAME, Look.TEXT, name);
-            layout.book().name(name, grid.address(row, COHERENT));
+            write(input, i);
             shown.add(grid.address(row, VALUE));
             held.add(grid.address(row, COHERENT));
             row++;
         }
         layout.places().show(input.name(), shown);
         layout.places().hold(input.name(), held);
+    }
+
+    private void write(TemplateInput input, int i) {
+        boolean isColumn = !input.rowNames().isEmpty();
+        Unit unit = input.unit(layout.draft().inputs().units());
+        grid.text(
+                row,
+                LABEL,
+                Look.TEXT,
+                input.label() + (isColumn ? ": " + input.rowNames().get(i) : ""));
+        grid.text(row, SYMBOL, Look.CENTRED, input.symbol());
+        grid.text(row, UNIT, Look.TEXT, Layout.unit(unit));
+        grid.text(row, RANGE, Look.TEXT, requirement(input, unit));
+        grid.text(row, MEANING, Look.NOTE, i == 0 ? input.meaning() + alternatives(input) : "");
+        if (layout.draft().inputs().get(input.name()).column() instanceof Column.Texts texts) {
+            writeWord(input, String.valueOf(texts.values().get(i)));
+        } else {
+            Column.Numbers numbers =
+                    (Column.Numbers) layout.draft().inputs().get(input.name()).column();
+            writeNumber(input, unit, numbers.values()[i]);
+        }
+        String name = isColumn ? Cells.name(layout.draft(), input.name(), i) : Cells.name(layout.draft(), input.name());
+        grid.text(row, CELL_NAME, Look.TEXT, name);
+        layout.book().name(name, grid.address(row, COHERENT));
     }
 
     private static String requirement(TemplateInput input, Unit unit) {
@@ -132,8 +136,8 @@ final class InputsSheet {
         grid.number(row, FACTOR, Look.CENTRED, NumberFormats.GENERAL, unit.scale());
         grid.text(row, COHERENT_UNIT, Look.TEXT, Layout.unit(unit.coherent()));
         List<String> bounds = LiveFormula.bounds(cell + "*" + factor, input.interval());
-        String inside = bounds.isEmpty() ? "TRUE" : "AND(" + String.join(",", bounds) + ")";
-        String admissible = "IF(ISNUMBER(" + cell + ")," + inside + ",FALSE)";
+        String inside = bounds.isEmpty() ? "TRUE()" : "AND(" + String.join(",", bounds) + ")";
+        String admissible = "IF(ISNUMBER(" + cell + ")," + inside + ",FALSE())";
         hold(
                 admissible,
                 cell + "*" + factor,

@@ -25,6 +25,9 @@ final class ResultsSheet {
     /** Where the checks stand among the places. */
     static final String CHECKS = "results_checks";
 
+    private static final String[] HEADS = {
+        "Quantity", "Symbol", "Live value", "Unit", "Filled value", "Check", "Function", "Revision", "Note"
+    };
     private static final double TOLERANCE = 1e-9;
     private static final int TOLERANCE_ROW = 2;
     private static final int LABEL = 0;
@@ -65,15 +68,8 @@ final class ResultsSheet {
         Layout.head(grid, "Results", NOTE);
         grid.text(TOLERANCE_ROW, LABEL, Look.TEXT, "Tolerance of the checks, relative");
         grid.number(TOLERANCE_ROW, LIVE, Look.LIVE, "0E+00", TOLERANCE);
-        String[] heads = {
-            "Quantity", "Symbol", "Live value", "Unit", "Filled value", "Check", "Function", "Revision", "Note"
-        };
-        for (int i = 0; i < heads.length; i++) {
-            grid.text(row, i, Look.COLUMN_HEAD, heads[i]);
-        }
-        grid.text(row, FACTOR, Look.WORKING_HEAD, "Factor to SI");
-        grid.text(row, COHERENT, Look.WORKING_HEAD, "SI value, live");
-        grid.text(row, CELL_NAME, Look.WORKING_HEAD, "Name of the SI cell");
+        grid.heads(row, LABEL, Look.COLUMN_HEAD, HEADS);
+        grid.heads(row, FACTOR, Look.WORKING_HEAD, "Factor to SI", "SI value, live", "Name of the SI cell");
         int headRow = row++;
         int first = row;
         for (Draft.Section section : layout.draft().sections()) {
@@ -82,14 +78,18 @@ final class ResultsSheet {
         }
         layout.places().show(CHECKS, List.of(grid.range(first, row - 1, CHECK)));
         headHelpers(headRow);
+        writeAlerts(first);
+        grid.poi().createFreezePane(0, headRow + 1);
+        PageSetup.repeat(grid, headRow, headRow);
+        layout.page().apply(grid, true, "$A$1:$I$" + row);
+    }
+
+    private void writeAlerts(int first) {
         Alerts.unless(grid, new CellRangeAddress(first, row - 1, CHECK, CHECK), Layout.AGREES, Layout.FILLED_ONLY);
         if (mostHelpers > 0) {
             int last = FIRST_HELPER + 2 * mostHelpers - 1;
             Alerts.quietErrors(grid, new CellRangeAddress(first, row - 1, FIRST_HELPER, last));
         }
-        grid.poi().createFreezePane(0, headRow + 1);
-        PageSetup.repeat(grid, headRow, headRow);
-        layout.page().apply(grid, true, "$A$1:$I$" + row);
     }
 
     private void headHelpers(int headRow) {
@@ -160,33 +160,31 @@ final class ResultsSheet {
         if (!isText && !unit.isCoherent()) {
             grid.number(row, FACTOR, Look.WORKING, NumberFormats.GENERAL, unit.scale());
         }
-        CellForm form = call.entry().cellForm();
-        if (!form.exists()) {
-            String factor = isText || unit.isCoherent() ? "" : Grid.inRow(row, FACTOR);
-            String value = Layout.coherent(Grid.inRow(row, FILLED), factor);
-            grid.formula(row, COHERENT, Look.WORKING, NumberFormats.GENERAL, value);
+        if (call.entry().cellForm().exists()) {
+            writeLive(call);
             return;
         }
+        String factor = isText || unit.isCoherent() ? "" : Grid.inRow(row, FACTOR);
+        working(COHERENT, Layout.coherent(Grid.inRow(row, FILLED), factor));
+    }
+
+    private void writeLive(DraftCall call) {
         List<Operand> operands = call.terms().stream()
                 .map(term -> Cells.single(layout.draft(), term))
                 .toList();
         int at = row;
         LiveFormula live = LiveFormula.of(call.entry(), operands, i -> Grid.inRow(at, FIRST_HELPER + 2 * i + 1));
-        for (int i = 0; i < live.helpers().size(); i++) {
-            grid.text(
-                    row,
-                    FIRST_HELPER + 2 * i,
-                    Look.WORKING,
-                    form.helpers().get(i).name());
-            grid.formula(
-                    row,
-                    FIRST_HELPER + 2 * i + 1,
-                    Look.WORKING,
-                    NumberFormats.GENERAL,
-                    live.helpers().get(i));
+        List<CellForm.Helper> helpers = call.entry().cellForm().helpers();
+        for (int i = 0; i < helpers.size(); i++) {
+            grid.text(row, FIRST_HELPER + 2 * i, Look.WORKING, helpers.get(i).name());
+            working(FIRST_HELPER + 2 * i + 1, live.helpers().get(i));
         }
-        mostHelpers = Math.max(mostHelpers, live.helpers().size());
-        grid.formula(row, COHERENT, Look.WORKING, NumberFormats.GENERAL, live.result());
+        mostHelpers = Math.max(mostHelpers, helpers.size());
+        working(COHERENT, live.result());
+    }
+
+    private void working(int column, String formula) {
+        grid.formula(row, column, Look.WORKING, NumberFormats.GENERAL, formula);
     }
 
     private String check(DraftCall call) {

@@ -28,10 +28,7 @@ final class SourcesSheet {
                 Look.NOTE,
                 "The functions that this workbook calls, from the library "
                         + layout.draft().catalogue().version() + ", and where each comes from.");
-        String[] heads = {"Function", "Revision", "What it gives", "Formula", "Sources"};
-        for (int i = 0; i < heads.length; i++) {
-            grid.text(3, i, Look.COLUMN_HEAD, heads[i]);
-        }
+        grid.heads(3, 0, Look.COLUMN_HEAD, "Function", "Revision", "What it gives", "Formula", "Sources");
         int row = 4;
         for (FunctionEntry entry : functions(layout).values()) {
             write(grid, row++, entry);

@@ -64,6 +64,12 @@ final class CoolingLine implements Template {
                 : draft.input("t_ratio");
         draft.headline(draft.result("end_t", "Temperature", "T", "t_from_t_over_t0", Map.of("t_over_t0", ratio)));
         draft.result(
+                "end_mach",
+                "Mach number",
+                "M",
+                "mach_from_area_ratio",
+                Map.of("area_ratio", draft.constant("ratio", 2), "branch", draft.word("fast", "supersonic")));
+        draft.result(
                 "end_area",
                 "Area ratio",
                 "A/At",
