@@ -44,13 +44,22 @@ final class InputCheck {
     }
 
     private RecordedQuantity check(RecordedQuantity quantity) throws UnreadableWorkbookException {
-        if (quantity.cells().isEmpty()) {
+        List<CellReference> references = new ArrayList<>();
+        for (String cellOrRange : quantity.cells()) {
+            references.addAll(Cells.of(cellOrRange));
+        }
+        if (references.isEmpty()) {
             return quantity;
         }
+        if (references.size() != quantity.values().rows()) {
+            throw new UnreadableWorkbookException(
+                    "the cells of " + quantity.name() + " on sheet Ledger",
+                    quantity.values().rows() + ", one for each value",
+                    String.valueOf(references.size()));
+        }
         List<@Nullable Object> found = new ArrayList<>();
-        for (int i = 0; i < quantity.cells().size(); i++) {
-            CellReference reference = Cells.of(quantity.cells().get(i)).get(0);
-            found.add(check(quantity, i, reference));
+        for (int i = 0; i < references.size(); i++) {
+            found.add(check(quantity, i, references.get(i)));
         }
         return new RecordedQuantity(
                 quantity.name(), quantity.role(), quantity.unit(), quantity.cells(), column(quantity, found));
