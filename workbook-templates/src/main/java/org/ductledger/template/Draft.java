@@ -37,7 +37,7 @@ public final class Draft {
     /**
      * Something that the inputs must fulfil together.
      *
-     * @param words what is required
+     * @param words what is required, as it follows the word "requires"
      * @param lesser must be less than {@code greater}
      */
     record Requirement(String words, Term lesser, Term greater) {}
@@ -188,7 +188,11 @@ public final class Draft {
         return table;
     }
 
-    /** Requires one quantity to be less than another; a workbook whose inputs break it is refused. */
+    /**
+     * Requires one quantity to be less than another; a workbook whose inputs break it is refused.
+     *
+     * @param words what is required, as it follows the word "requires"
+     */
     public void requires(String words, Term lesser, Term greater) {
         requirements.add(new Requirement(words, lesser, greater));
     }

@@ -61,7 +61,7 @@ final class InputsSheet {
     }
 
     private void write() {
-        grid.widths(26, 8, 14, 15, 33, 14, 16, 14, 11, 20, 60);
+        grid.widths(32, 8, 14, 15, 33, 14, 16, 14, 11, 20, 60);
         Layout.head(grid, "Inputs", MEANING);
         grid.heads(row, LABEL, Look.COLUMN_HEAD, HEADS);
         row++;

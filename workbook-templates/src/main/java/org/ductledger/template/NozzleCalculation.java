@@ -17,7 +17,7 @@ final class NozzleCalculation {
         for (String input : List.of("gamma", "gas_constant", "p0", "t0", "pb", "inlet_area_ratio")) {
             draft.bind(input, draft.input(input));
         }
-        draft.requires("The back pressure lies below the supply pressure.", draft.input("pb"), draft.input("p0"));
+        draft.requires("a back pressure below the supply pressure", draft.input("pb"), draft.input("p0"));
         writeThroat();
         Term exitMach = writeExitMach();
         writeGeometry(exitMach);
@@ -53,9 +53,7 @@ final class NozzleCalculation {
         result("throat_speed", "Speed", "Vt", "flow_speed", Map.of("mach", sonic));
         if (draft.has("exit_pressure")) {
             draft.requires(
-                    "The design exit pressure lies below the pressure in the sonic throat.",
-                    draft.input("exit_pressure"),
-                    p);
+                    "a design exit pressure below the pressure in the sonic throat", draft.input("exit_pressure"), p);
         }
         writeThroatArea();
         Term choked = result(

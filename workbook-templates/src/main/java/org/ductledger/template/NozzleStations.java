@@ -49,16 +49,17 @@ final class NozzleStations {
     private void requireOrder() {
         for (int i = 0; i < SEGMENTS; i++) {
             draft.requires(
-                    "Contour: " + NozzleInputs.POINTS.get(i) + " lies ahead of " + NozzleInputs.POINTS.get(i + 1) + ".",
+                    "a contour with its " + NozzleInputs.POINTS.get(i) + " ahead of its "
+                            + NozzleInputs.POINTS.get(i + 1),
                     draft.input("contour_x", i),
                     draft.input("contour_x", i + 1));
         }
         draft.requires(
-                "Contour: from inlet side 1 to inlet side 2 it narrows.",
+                "a contour that narrows from inlet side 1 to inlet side 2",
                 draft.input("contour_opening", 1),
                 draft.input("contour_opening", 0));
         draft.requires(
-                "Contour: from exit side 1 to exit side 2 it widens.",
+                "a contour that widens from exit side 1 to exit side 2",
                 draft.input("contour_opening", 2),
                 draft.input("contour_opening", 3));
     }

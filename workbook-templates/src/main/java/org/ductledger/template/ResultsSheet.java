@@ -64,7 +64,7 @@ final class ResultsSheet {
     }
 
     private void write() {
-        grid.widths(38, 12, 16, 13, 16, 18, 36, 9, 44, 3, 16, 18, 24);
+        grid.widths(42, 10, 16, 14, 16, 28, 34, 9, 44, 3, 16, 18, 24);
         Layout.head(grid, "Results", NOTE);
         grid.text(TOLERANCE_ROW, LABEL, Look.TEXT, "Tolerance of the checks, relative");
         grid.number(TOLERANCE_ROW, LIVE, Look.LIVE, "0E+00", TOLERANCE);

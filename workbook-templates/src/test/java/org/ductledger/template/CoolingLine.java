@@ -57,7 +57,7 @@ final class CoolingLine implements Template {
     public void write(Draft draft) {
         draft.bind("gamma", draft.input("gamma"));
         draft.bind("t0", draft.input("t0"));
-        draft.requires("The first point lies ahead.", draft.input("point", 0), draft.input("point", 1));
+        draft.requires("the first point ahead of the last", draft.input("point", 0), draft.input("point", 1));
         draft.section("End");
         Term ratio = draft.has("mach")
                 ? draft.result("end_ratio", "Ratio", "T/T0", "t_over_t0", Map.of("mach", draft.input("mach")))

@@ -110,7 +110,7 @@ final class InputReaderTest {
                 .problems();
         assertEquals(
                 List.of(new InputProblem(
-                        "point", "The first point lies ahead.", "50 mm, which is not less than 20 mm")),
+                        "point", "the first point ahead of the last", "50 mm, which is not less than 20 mm")),
                 problems);
     }
 }
