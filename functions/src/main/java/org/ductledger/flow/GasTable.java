@@ -81,7 +81,10 @@ final class GasTable {
         },
     };
 
-    /** NASA TM-4647: ln(mu / 1 micropoise) = A ln T + B/T + C/T^2 + D; for air Sutherland's beta and S. */
+    /**
+     * NASA TM-4647, as open programs restate it: ln(mu / 1 micropoise) = A ln T + B/T + C/T^2 + D; for air Sutherland's
+     * beta and S.
+     */
     static final double[][][] VISCOSITY = {
         {{100, 1900, 1.458e-6, 110.4}}, // air
         { // nitrogen
