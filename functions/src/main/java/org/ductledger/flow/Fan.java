@@ -27,25 +27,26 @@ final class Fan {
 
     /** The Prandtl-Meyer angle in degrees; M &gt;= 1. */
     static double prandtlMeyerAngle(double mach, double gamma) {
-        double d = 2 / (gamma + 1);
-        double c = 0.5 * (gamma - 1) * d;
-        double root = Math.sqrt(c);
+        double reach = reach(gamma);
         double y = cotangent(mach);
-        return Degrees.ofRadians(angleAt(y, root * y, d / (root + c)));
+        return Degrees.ofRadians(angleAt(y, (gamma - 1) / reach * y, 2 / (gamma - 1 + reach)));
     }
 
     /** The Prandtl-Meyer angle of expansion into vacuum, in degrees. */
     static double prandtlMeyerAngleMax(double gamma) {
-        return 180 / (gamma - 1 + Math.sqrt((gamma - 1) * (gamma + 1)));
+        return 180 / (gamma - 1 + reach(gamma));
     }
 
     /** What is left of the angle up to expansion into vacuum, in degrees, to its own last digits. */
     static double angleLeft(double mach, double gamma) {
-        double d = 2 / (gamma + 1);
-        double c = 0.5 * (gamma - 1) * d;
-        double root = Math.sqrt(c);
+        double reach = reach(gamma);
         double u = 1 / cotangent(mach);
-        return Degrees.ofRadians(leftAt(u, u / root, d / (root + c)));
+        return Degrees.ofRadians(leftAt(u, reach / (gamma - 1) * u, 2 / (gamma - 1 + reach)));
+    }
+
+    /** sqrt(gamma^2 - 1), with which sqrt(c) = (gamma-1)/reach and kappa = 2/(gamma-1+reach). */
+    static double reach(double gamma) {
+        return Math.sqrt((gamma - 1) * (gamma + 1));
     }
 
     /** y = sqrt(M^2 - 1), the cotangent of the Mach angle. */
@@ -54,17 +55,21 @@ final class Fan {
     }
 
     /**
-     * nu in radians: kappa atan z - atan(kappa z/(1 + y z)), in which nothing cancels as gamma grows; for small z the
-     * same, less the terms that would cancel there.
+     * nu in radians: kappa atan z - atan(kappa z/(1 + y z)), in which nothing cancels as gamma grows.
      *
      * @param z sqrt(c) y, with c = (gamma-1)/(gamma+1)
      * @param kappa 1/sqrt(c) - 1
      */
-    static double angleAt(double y, double z, double kappa) {
-        double delta = kappa * z / (1 + y * z);
+    private static double angleAt(double y, double z, double kappa) {
         return z < SMALL_Z
-                ? ArcTangent.lag(delta) + (delta * (y * z) - kappa * ArcTangent.lag(z))
-                : kappa * ArcTangent.of(z) - ArcTangent.of(delta);
+                ? smallAngleAt(y, z, kappa)
+                : kappa * ArcTangent.of(z) - ArcTangent.of(kappa * z / (1 + y * z));
+    }
+
+    /** The same less the terms that cancel for small z; it holds as far as the angle of z = 1.5. */
+    static double smallAngleAt(double y, double z, double kappa) {
+        double delta = kappa * z / (1 + y * z);
+        return ArcTangent.lag(delta) + (delta * (y * z) - kappa * ArcTangent.lag(z));
     }
 
     /** nu_max - nu in radians, a sum of positive terms, of u = 1/y and w = 1/z. */

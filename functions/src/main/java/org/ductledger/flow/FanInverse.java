@@ -23,33 +23,33 @@ final class FanInverse {
         if (!(angle >= 0 && left > 0)) {
             return Double.NaN;
         }
-        double d = 2 / (gamma + 1);
-        double c = 0.5 * (gamma - 1) * d;
-        double root = Math.sqrt(c);
-        double kappa = d / (root + c);
-        double y = seed(Degrees.toRadians(angle), left / (angle + left), d, c, kappa);
+        double reach = Fan.reach(gamma);
+        double root = (gamma - 1) / reach;
+        double kappa = 2 / (gamma - 1 + reach);
+        double y = seed(Degrees.toRadians(angle), (angle + left) / left, gamma, root, kappa);
         if (y < NEAR_SONIC) {
             return 1;
         }
         return angle < left
-                ? fromAngle(y, Degrees.toRadians(angle), d, c, kappa)
-                : fromLeft(1 / y, Degrees.toRadians(left), d, c, kappa);
+                ? fromAngle(y, Degrees.toRadians(angle), gamma, root, kappa)
+                : fromLeft(1 / y, Degrees.toRadians(left), gamma, root, kappa);
     }
 
-    private static double fromAngle(double seed, double nu, double d, double c, double kappa) {
-        double root = Math.sqrt(c);
+    private static double fromAngle(double seed, double nu, double gamma, double root, double kappa) {
+        double c = root * root;
         double y = seed;
         for (int i = 0; i < 2; i++) {
-            y = step(y, Fan.angleAt(y, root * y, kappa) - nu, d, c);
+            y = step(y, 0.5 * (gamma + 1) * (Fan.smallAngleAt(y, root * y, kappa) - nu), c);
         }
         return Math.sqrt(1 + y * y);
     }
 
-    private static double fromLeft(double seed, double left, double d, double c, double kappa) {
-        double root = Math.sqrt(c);
+    private static double fromLeft(double seed, double left, double gamma, double root, double kappa) {
+        double c = root * root;
+        double wide = Fan.reach(gamma) / (gamma - 1);
         double u = seed;
         for (int i = 0; i < 2; i++) {
-            u = stepOfReciprocal(u, Fan.leftAt(u, u / root, kappa) - left, d, c);
+            u = stepOfReciprocal(u, 0.5 * (gamma + 1) * (Fan.leftAt(u, wide * u, kappa) - left), c);
         }
         return Math.sqrt(1 + u * u) / u;
     }
@@ -57,14 +57,19 @@ final class FanInverse {
     /**
      * y = sqrt(M^2 - 1) to 4 % at gamma 1.4: the first terms of the series in p = cbrt(3 nu/d), and the pole at nu_max
      * with its residue.
+     *
+     * @param wholeOverLeft nu_max / (nu_max - nu)
      */
-    private static double seed(double nu, double leftShare, double d, double c, double kappa) {
+    private static double seed(double nu, double wholeOverLeft, double gamma, double root, double kappa) {
+        double c = root * root;
         double greatest = 0.5 * Math.PI * kappa;
-        double p = roughCubeRoot(3 * nu / d);
-        double q = roughCubeRoot(3 * greatest / d);
-        double atPole = d / (c * greatest * q);
-        double beta = (atPole - (1 + c) * q * q / 5) / (q * q * q * q);
-        return p * (leftShare + p * p * ((1 + c) / 5 + beta * p * p)) / leftShare;
+        double p = roughCubeRoot(1.5 * (gamma + 1) * nu);
+        double q = roughCubeRoot(1.5 * (gamma + 1) * greatest);
+        double spread = 0.2 * (1 + c);
+        double square = q * q;
+        double pole = c * greatest * q;
+        double beta = (kappa * root * (1 + root) - spread * square * pole) / (pole * square * square);
+        return p * (1 + p * p * (spread + beta * p * p) * wholeOverLeft);
     }
 
     /** The cube root to 1e-5: a third of the exponent, and one step of Halley. */
@@ -74,24 +79,31 @@ final class FanInverse {
         return r * (cube + 2 * x) / (2 * cube + x);
     }
 
-    /** A step to nu(y) = nu; the derivatives of nu are rational in y. */
-    private static double step(double y, double excess, double d, double c) {
+    /** A step to nu(y) = nu, of excess = (nu(y) - nu)/d; the derivatives of nu are rational in y. */
+    private static double step(double y, double excess, double c) {
         double s = y * y;
-        double m = 1 / (1 + s);
-        double h = 1 / (1 + c * s);
-        double second = 2 * (1 - c * s * s) * m * h / y;
-        double third = second * second - 2 * (1 / s + (1 - s) * m * m + c * (1 - c * s) * h * h);
-        return y - fourthOrder(excess / (d * s * m * h), second, third);
+        double m = 1 + s;
+        double h = 1 + c * s;
+        double r = 1 / (m * h);
+        double v = 1 / y;
+        double rh = r * m;
+        double rm = r * h;
+        double second = 2 * (1 - c * s * s) * r * v;
+        double third = second * second - 2 * (v * v + (1 - s) * rm * rm + c * (1 - c * s) * rh * rh);
+        return y - fourthOrder(excess * m * h * v * v, second, third);
     }
 
     /** A step to nu_max - nu(1/u) = left, of u = 1/y, in which it is smooth up to vacuum. */
-    private static double stepOfReciprocal(double u, double excess, double d, double c) {
+    private static double stepOfReciprocal(double u, double excess, double c) {
         double s = u * u;
-        double m = 1 / (1 + s);
-        double h = 1 / (c + s);
-        double second = -2 * u * (m + h);
-        double third = second * second - 2 * ((1 - s) * m * m + (c - s) * h * h);
-        return u - fourthOrder(excess / (d * m * h), second, third);
+        double m = 1 + s;
+        double h = c + s;
+        double r = 1 / (m * h);
+        double rh = r * m;
+        double rm = r * h;
+        double second = -2 * u * (rm + rh);
+        double third = second * second - 2 * ((1 - s) * rm * rm + (c - s) * rh * rh);
+        return u - fourthOrder(excess * m * h, second, third);
     }
 
     /**

@@ -54,6 +54,35 @@ class ExactGridValidationTest {
                         .with("branch", "subsonic"),
                 ExactGrid.of("inv_mach_from_mass_flow_parameter_supersonic.csv", "mach_from_mass_flow_number", "mass_flow_number")
                         .with("branch", "supersonic"),
+                ExactGrid.of("prandtl_meyer_rad.csv", "prandtl_meyer_angle", "mach").givingRadians(),
+                ExactGrid.of("inv_mach_from_prandtl_meyer_rad.csv", "mach_from_prandtl_meyer_angle", "prandtl_meyer_angle")
+                        .takingRadians(),
+                ExactGrid.of("oblique_theta_from_beta_rad.csv", "oblique_deflection", "shock_angle", "mach1")
+                        .takingRadians()
+                        .givingRadians(),
+                ExactGrid.of("oblique_beta_weak_rad.csv", "oblique_shock_angle", "deflection", "mach1")
+                        .takingRadians()
+                        .givingRadians()
+                        .with("branch", "weak"),
+                ExactGrid.of("oblique_beta_strong_rad.csv", "oblique_shock_angle", "deflection", "mach1")
+                        .takingRadians()
+                        .givingRadians()
+                        .with("branch", "strong"),
+                ExactGrid.of("oblique_theta_max_rad.csv", "oblique_deflection_max", "mach1").givingRadians(),
+                ExactGrid.of("oblique_beta_at_theta_max_rad.csv", "oblique_angle_at_deflection_max", "mach1").givingRadians(),
+                ExactGrid.of("oblique_beta_sonic_rad.csv", "oblique_angle_at_sonic", "mach1").givingRadians(),
+                ExactGrid.of("oblique_m2_weak.csv", "oblique_mach2", "deflection", "mach1")
+                        .takingRadians()
+                        .with("branch", "weak")
+                        .through("oblique_shock_angle", "shock_angle"),
+                ExactGrid.of("oblique_m2_strong.csv", "oblique_mach2", "deflection", "mach1")
+                        .takingRadians()
+                        .with("branch", "strong")
+                        .through("oblique_shock_angle", "shock_angle"),
+                ExactGrid.of("oblique_p2_p1_weak.csv", "oblique_p2_over_p1", "deflection", "mach1")
+                        .takingRadians()
+                        .with("branch", "weak")
+                        .through("oblique_shock_angle", "shock_angle"),
                 ExactGrid.of("normal_shock_m2.csv", "shock_mach2", "mach1"),
                 ExactGrid.of("normal_shock_p2_p1.csv", "shock_p2_over_p1", "mach1"),
                 ExactGrid.of("normal_shock_t2_t1.csv", "shock_t2_over_t1", "mach1"),

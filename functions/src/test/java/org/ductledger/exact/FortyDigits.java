@@ -24,6 +24,10 @@ public final class FortyDigits {
         return FIELD.newDfp(digits);
     }
 
+    public static Dfp pi() {
+        return FIELD.getPi();
+    }
+
     public static Dfp exp(Dfp x) {
         return DfpMath.exp(x);
     }
