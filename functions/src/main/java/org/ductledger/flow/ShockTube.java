@@ -16,8 +16,11 @@ final class ShockTube {
 
     private static final int CELL_STEPS = 8;
 
-    /** A step this small, of the logarithm of the shock's pressure ratio, changes no digit after it. */
-    private static final double LAST_STEP = 1e-5;
+    /** After a step this small, of the logarithm of the shock's pressure ratio, nine digits are right. */
+    private static final double LAST_STEP = 1e-4;
+
+    /** A greater excess is that of a shock a last digit short of its limit, where the ratio has no digits. */
+    private static final double MOST_EXCESS = 1e-3;
 
     private static final double LARGEST_FRACTION = 1 - 0x1p-53;
 
@@ -73,10 +76,19 @@ final class ShockTube {
             double step = (s - n * StrictMath.log1p(-w) - whole) / (1 + slope);
             s -= step / (1 - 0.5 * Math.min(1, step * bend));
             if (Math.abs(step) <= LAST_STEP * s) {
-                return Math.sqrt(1 + StrictMath.expm1(s) / b);
+                return refined(Math.sqrt(1 + StrictMath.expm1(s) / b), p4OverP1, gamma1, gamma4, a4OverA1);
             }
         }
         return Double.NaN;
+    }
+
+    /** A step by the ratio itself, which has more digits than its logarithm. */
+    private static double refined(
+            double mach1, double p4OverP1, double gamma1, double gamma4, double a4OverA1) {
+        double excess = p4OverP1(mach1, gamma1, gamma4, a4OverA1) / p4OverP1 - 1;
+        return Math.abs(excess) < MOST_EXCESS
+                ? Math.max(1, mach1 - excess / growth(mach1, gamma1, gamma4, a4OverA1))
+                : mach1;
     }
 
     /** ln(p2/p1) of the shock with this q. */
