@@ -7,7 +7,6 @@ import java.util.List;
 import org.ductledger.catalogue.Argument;
 import org.ductledger.catalogue.CellForm;
 import org.ductledger.catalogue.EntryBuilder;
-import org.ductledger.catalogue.Family;
 import org.ductledger.catalogue.FaultKind;
 import org.ductledger.catalogue.FunctionEntry;
 import org.ductledger.catalogue.Interval;
@@ -17,7 +16,7 @@ import org.ductledger.numeric.Degrees;
 
 /** A circular cone along supersonic flow, with an attached shock. Angles in degrees. */
 final class Cone {
-    private static final Family FAMILY = new Family("cone", "Circular cone in supersonic flow, without incidence");
+    private static final Chapter FAMILY = new Chapter("cone", "Circular cone in supersonic flow, without incidence");
 
     private Cone() {}
 

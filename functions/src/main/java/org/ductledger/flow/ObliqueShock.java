@@ -6,7 +6,6 @@ import static org.ductledger.flow.Arguments.SUPERSONIC_MACH1;
 import java.util.List;
 import org.ductledger.catalogue.Argument;
 import org.ductledger.catalogue.EntryBuilder;
-import org.ductledger.catalogue.Family;
 import org.ductledger.catalogue.FaultKind;
 import org.ductledger.catalogue.FunctionEntry;
 import org.ductledger.catalogue.Interval;
@@ -109,7 +108,7 @@ final class ObliqueShock {
         return Degrees.ofRadians(ArcTangent.of(2 * Degrees.sin(shockAngle) * cos / (gamma - 1 + 2 * cos * cos)));
     }
 
-    private static final Family FAMILY = new Family("oblique", "Plane oblique shock in a perfect gas");
+    private static final Chapter FAMILY = new Chapter("oblique", "Plane oblique shock in a perfect gas");
 
     private static final Argument SHOCK_ANGLE = Argument.number(
             "shock_angle",
