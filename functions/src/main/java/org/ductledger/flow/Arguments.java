@@ -28,8 +28,34 @@ final class Arguments {
             Argument.choice("station_side", "side of the throat on which the station lies", "converging", "diverging");
     static final Argument BRANCH = Argument.choice("branch", "which of the two solutions", "subsonic", "supersonic");
 
+    static final Argument P0_OVER_P0STAR = Argument.number(
+            "p0_over_p0star", "p0/p0*", "1", Interval.atLeast(1), "stagnation pressure over its value at M = 1");
+    static final Argument THERMAL_BRANCH =
+            Argument.choice("branch", "which of the two solutions about M = 1/sqrt(gamma)", "below", "above");
+    static final Argument INLET_MACH =
+            Argument.number("mach1", "M1", "1", Interval.above(0), "Mach number at the first station");
+    static final Argument FL_OVER_D = Argument.number(
+            "fl_over_d",
+            "f L/D",
+            "1",
+            Interval.atLeast(0),
+            "Darcy friction factor (4 x Fanning) times length over hydraulic diameter");
+    /** A duct length with its sign; beyond these ends it is no duct. */
+    static final Argument SIGNED_FL_OVER_D = FL_OVER_D
+            .within(Interval.closed(-1e12, 1e12))
+            .named(
+                    "fl_over_d",
+                    "f L/D",
+                    "Darcy friction factor (4 x Fanning) times length over hydraulic diameter; negative upstream");
+
     /** The place of {@code subsonic} in {@link #BRANCH}. */
     static final double SUBSONIC = 0;
+
+    /** The place of {@code below} in {@link #THERMAL_BRANCH}. */
+    static final double BELOW = 0;
+
+    /** The place of {@code above} in {@link #THERMAL_BRANCH}. */
+    static final double ABOVE = 1;
 
     /** The place of {@code converging} in {@link #STATION_SIDE}. */
     static final double CONVERGING = 0;
