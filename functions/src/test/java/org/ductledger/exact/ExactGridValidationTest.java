@@ -94,7 +94,34 @@ class ExactGridValidationTest {
                 ExactGrid.of("inv_normal_shock_m1_from_t2_t1.csv", "mach1_from_shock_t2_over_t1", "t2_over_t1"),
                 ExactGrid.of("inv_normal_shock_m1_from_rho2_rho1.csv", "mach1_from_shock_rho2_over_rho1", "rho2_over_rho1"),
                 ExactGrid.of("inv_normal_shock_m1_from_p02_p01.csv", "mach1_from_shock_p02_over_p01", "p02_over_p01"),
-                ExactGrid.of("inv_normal_shock_m1_from_p02_p1.csv", "mach1_from_shock_p02_over_p1", "p02_over_p1"));
+                ExactGrid.of("inv_normal_shock_m1_from_p02_p1.csv", "mach1_from_shock_p02_over_p1", "p02_over_p1"),
+                ExactGrid.of("fanno_4fL_D.csv", "fanno_fl_over_d", "mach"),
+                ExactGrid.of("fanno_t_tstar.csv", "fanno_t_over_tstar", "mach"),
+                ExactGrid.of("fanno_p_pstar.csv", "fanno_p_over_pstar", "mach"),
+                ExactGrid.of("fanno_rho_rhostar.csv", "fanno_rho_over_rhostar", "mach"),
+                ExactGrid.of("fanno_p0_p0star.csv", "fanno_p0_over_p0star", "mach"),
+                ExactGrid.of("inv_fanno_mach_from_4fL_D_subsonic.csv", "mach_from_fanno_fl_over_d", "fl_over_d")
+                        .with("branch", "subsonic"),
+                ExactGrid.of("inv_fanno_mach_from_4fL_D_supersonic.csv", "mach_from_fanno_fl_over_d", "fl_over_d")
+                        .with("branch", "supersonic"),
+                ExactGrid.of("rayleigh_t0_t0star.csv", "rayleigh_t0_over_t0star", "mach"),
+                ExactGrid.of("rayleigh_t_tstar.csv", "rayleigh_t_over_tstar", "mach"),
+                ExactGrid.of("rayleigh_p_pstar.csv", "rayleigh_p_over_pstar", "mach"),
+                ExactGrid.of("rayleigh_rho_rhostar.csv", "rayleigh_rho_over_rhostar", "mach"),
+                ExactGrid.of("rayleigh_p0_p0star.csv", "rayleigh_p0_over_p0star", "mach"),
+                ExactGrid.of("inv_rayleigh_mach_from_t0_t0star_subsonic.csv", "mach_from_rayleigh_t0_over_t0star", "t0_over_t0star")
+                        .with("branch", "subsonic"),
+                ExactGrid.of("inv_rayleigh_mach_from_t0_t0star_supersonic.csv", "mach_from_rayleigh_t0_over_t0star", "t0_over_t0star")
+                        .with("branch", "supersonic"),
+                ExactGrid.of("inv_rayleigh_mach_from_p_pstar.csv", "mach_from_rayleigh_p_over_pstar", "p_over_pstar"),
+                ExactGrid.of("isothermal_4fL_D.csv", "isothermal_fl_over_d", "mach"),
+                ExactGrid.of("isothermal_p_pstar.csv", "isothermal_p_over_pstar", "mach"),
+                ExactGrid.of("isothermal_t0_t0star.csv", "isothermal_t0_over_t0star", "mach"),
+                ExactGrid.of("isothermal_p0_p0star.csv", "isothermal_p0_over_p0star", "mach"),
+                ExactGrid.of("inv_isothermal_mach_from_4fL_D_low.csv", "mach_from_isothermal_fl_over_d", "fl_over_d")
+                        .with("branch", "below"),
+                ExactGrid.of("inv_isothermal_mach_from_4fL_D_high.csv", "mach_from_isothermal_fl_over_d", "fl_over_d")
+                        .with("branch", "above"));
     }
     // spotless:on
 
