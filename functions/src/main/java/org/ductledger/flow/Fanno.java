@@ -7,7 +7,6 @@ import java.util.List;
 import org.ductledger.catalogue.Argument;
 import org.ductledger.catalogue.CellForm;
 import org.ductledger.catalogue.EntryBuilder;
-import org.ductledger.catalogue.Family;
 import org.ductledger.catalogue.FunctionEntry;
 import org.ductledger.catalogue.Interval;
 import org.ductledger.catalogue.Kernel;
@@ -17,7 +16,7 @@ import org.ductledger.numeric.Rounding;
 
 /** Fanno flow: a perfect gas in an adiabatic duct of constant area, with friction. The star is M = 1. */
 final class Fanno {
-    static final Family FAMILY = new Family("fanno", "Adiabatic duct flow with friction (Fanno)");
+    static final Chapter FAMILY = new Chapter("fanno", "Adiabatic duct flow with friction (Fanno)");
 
     /** Between this and its reciprocal M^2 may be squared again. */
     private static final double MOST_MACH = 1e70;

@@ -14,7 +14,6 @@ import java.util.Map;
 import org.ductledger.catalogue.Argument;
 import org.ductledger.catalogue.CellForm;
 import org.ductledger.catalogue.EntryBuilder;
-import org.ductledger.catalogue.Family;
 import org.ductledger.catalogue.FaultKind;
 import org.ductledger.catalogue.FunctionEntry;
 import org.ductledger.catalogue.Interval;
@@ -31,7 +30,7 @@ import org.ductledger.numeric.Rounding;
  * The star is M = 1/sqrt(gamma), where such a flow chokes. With y = 1/(gamma M^2) - 1 the length to it is y - ln(1 + y).
  */
 final class Isothermal {
-    private static final Family FAMILY = new Family("isothermal", "Isothermal duct flow with friction");
+    private static final Chapter FAMILY = new Chapter("isothermal", "Isothermal duct flow with friction");
 
     /** Between this and its reciprocal M^2 may be squared again. */
     private static final double MOST_MACH = 1e70;

@@ -7,7 +7,6 @@ import static org.ductledger.flow.Arguments.MACH;
 import java.util.List;
 import org.ductledger.catalogue.Argument;
 import org.ductledger.catalogue.EntryBuilder;
-import org.ductledger.catalogue.Family;
 import org.ductledger.catalogue.FunctionEntry;
 import org.ductledger.catalogue.Interval;
 import org.ductledger.catalogue.Kernel;
@@ -19,7 +18,7 @@ import org.ductledger.numeric.StagnationPower;
 
 /** Rayleigh flow: a perfect gas heated or cooled in a duct of constant area, without friction. The star is M = 1. */
 final class Rayleigh {
-    static final Family FAMILY = new Family("rayleigh", "Frictionless duct flow with heat (Rayleigh)");
+    static final Chapter FAMILY = new Chapter("rayleigh", "Frictionless duct flow with heat (Rayleigh)");
 
     /** Beyond this the 1 in 1 + gamma M^2 is below the last digit. */
     private static final double MOST_MACH = 1e70;
