@@ -83,8 +83,7 @@ final class ShockTube {
     }
 
     /** A step by the ratio itself, which has more digits than its logarithm. */
-    private static double refined(
-            double mach1, double p4OverP1, double gamma1, double gamma4, double a4OverA1) {
+    private static double refined(double mach1, double p4OverP1, double gamma1, double gamma4, double a4OverA1) {
         double excess = p4OverP1(mach1, gamma1, gamma4, a4OverA1) / p4OverP1 - 1;
         return Math.abs(excess) < MOST_EXCESS
                 ? Math.max(1, mach1 - excess / growth(mach1, gamma1, gamma4, a4OverA1))

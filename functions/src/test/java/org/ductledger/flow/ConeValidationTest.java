@@ -53,7 +53,8 @@ class ConeValidationTest {
     void theFlowHoldsToTenDigits() {
         PublishedTable.read("oblique_cone_expansion.csv")
                 .rows()
-                .filter(row -> row.quantity().startsWith("cone") && !row.toString().contains("SP-3004"))
+                .filter(row ->
+                        row.quantity().startsWith("cone") && !row.toString().contains("SP-3004"))
                 .forEach(row -> {
                     double exact = Double.parseDouble(row.exact());
                     assertEquals(exact, answer(row).value(), 1e-10 * exact, row::toString);

@@ -20,7 +20,8 @@ class MovingShockTest {
             double mach1 = ShockTube.mach1(given, gamma1, gamma4, a);
             double back = ShockTube.p4OverP1(mach1, gamma1, gamma4, a);
             double passed = Math.ulp(mach1) / ShockTube.ofMach()[0].at(given, gamma1, gamma4, a);
-            double condition = Math.log(given) + Math.abs(a * ShockTube.ofRatio()[3].at(mach1, gamma1, gamma4, a)) / given;
+            double condition =
+                    Math.log(given) + Math.abs(a * ShockTube.ofRatio()[3].at(mach1, gamma1, gamma4, a)) / given;
             double allowed = 4 * passed + 8 * (1 + condition) * Math.ulp(given);
             assertEquals(given, back, allowed, () -> given + ", " + gamma1 + ", " + gamma4 + ", " + a);
         }

@@ -38,8 +38,10 @@ class MovingShockValidationTest {
      * no function answers them.
      */
     private static Answer ofRiemann(Row row) {
-        String state = row.inputs().substring(row.inputs().lastIndexOf('(') + 1, row.inputs().length() - 1);
-        double[] s = Arrays.stream(state.split(",")).mapToDouble(Double::parseDouble).toArray();
+        String state = row.inputs()
+                .substring(row.inputs().lastIndexOf('(') + 1, row.inputs().length() - 1);
+        double[] s =
+                Arrays.stream(state.split(",")).mapToDouble(Double::parseDouble).toArray();
         if (s[1] != 0 || s[4] != 0) {
             return Answer.none("gas in motion on both sides");
         }
@@ -112,15 +114,25 @@ class MovingShockValidationTest {
             Dfp p = g.multiply(m).multiply(2).subtract(g.subtract(1)).divide(g.add(1));
             Dfp rho = g.add(1).multiply(m).divide(g.subtract(1).multiply(m).add(2));
             Dfp sound = p.divide(rho).sqrt();
-            Dfp gas = FortyDigits.of(mach1).multiply(rho.subtract(1)).divide(rho).divide(sound);
+            Dfp gas =
+                    FortyDigits.of(mach1).multiply(rho.subtract(1)).divide(rho).divide(sound);
             agrees("u/a2", MovingShock.gasMach2(mach1, gamma), gas, 4, mach1, gamma);
             Dfp reflected = reflected(gas, g);
             agrees("Mr", MovingShock.reflectedMach(mach1, gamma), reflected, 4, mach1, gamma);
             Dfp square = reflected.multiply(reflected);
-            Dfp p5 = g.multiply(square).multiply(2).subtract(g.subtract(1)).divide(g.add(1)).multiply(p);
+            Dfp p5 = g.multiply(square)
+                    .multiply(2)
+                    .subtract(g.subtract(1))
+                    .divide(g.add(1))
+                    .multiply(p);
             agrees("p5/p1", MovingShock.p5OverP1(mach1, gamma), p5, 6, mach1, gamma);
             double strength = NormalShock.p2OverP1(mach1, gamma);
-            Dfp ms = FortyDigits.of(strength).subtract(1).multiply(g.add(1)).divide(g.multiply(2)).add(1).sqrt();
+            Dfp ms = FortyDigits.of(strength)
+                    .subtract(1)
+                    .multiply(g.add(1))
+                    .divide(g.multiply(2))
+                    .add(1)
+                    .sqrt();
             agrees("Ms", MovingShock.mach(strength, gamma), ms, 4, mach1, gamma);
         }
     }
@@ -136,13 +148,15 @@ class MovingShockValidationTest {
         SplittableRandom random = new SplittableRandom(794);
         for (int i = 0; i < POINTS; i++) {
             double gamma1 = 1.02 + 0.7 * random.nextDouble();
-            double gamma4 = i % 5 == 0 ? 1 + StrictMath.pow(10, -6 * random.nextDouble()) : 1.02 + 0.7 * random.nextDouble();
+            double gamma4 =
+                    i % 5 == 0 ? 1 + StrictMath.pow(10, -6 * random.nextDouble()) : 1.02 + 0.7 * random.nextDouble();
             double a = StrictMath.pow(10, -1 + 2 * random.nextDouble());
             double given = 1 + StrictMath.pow(10, -8 + 14 * random.nextDouble());
             double mach1 = ShockTube.mach1(given, gamma1, gamma4, a);
             Dfp exact = p4OverP1(mach1, gamma1, gamma4, a);
             double passed = Math.ulp(mach1) / ShockTube.ofMach()[0].at(given, gamma1, gamma4, a);
-            double condition = Math.log(given) + Math.abs(a * ShockTube.ofRatio()[3].at(mach1, gamma1, gamma4, a)) / given;
+            double condition =
+                    Math.log(given) + Math.abs(a * ShockTube.ofRatio()[3].at(mach1, gamma1, gamma4, a)) / given;
             double steepness = 4 * (1 + condition) * Math.ulp(given);
             String where = given + ", " + gamma1 + ", " + gamma4 + ", " + a;
             assertEquals(0, exact.subtract(FortyDigits.of(given)).toDouble(), 4 * passed + steepness, where);
@@ -155,7 +169,10 @@ class MovingShockValidationTest {
         Dfp m = FortyDigits.of(mach1);
         Dfp g1 = FortyDigits.of(gamma1);
         Dfp less = FortyDigits.of(gamma4).subtract(1);
-        Dfp p = g1.multiply(2).divide(g1.add(1)).multiply(m.multiply(m).subtract(1)).add(1);
+        Dfp p = g1.multiply(2)
+                .divide(g1.add(1))
+                .multiply(m.multiply(m).subtract(1))
+                .add(1);
         Dfp w = less.divide(g1.add(1)).divide(FortyDigits.of(a4OverA1)).multiply(m.subtract(m.reciprocal()));
         Dfp base = w.negate().add(1);
         return p.divide(pow(base, FortyDigits.of(gamma4).multiply(2).divide(less)));

@@ -44,8 +44,7 @@ class ObliqueShockValidationTest {
             case "theta_max_deg" -> rounded(ObliqueLimits.deflectionMax(mach1, gamma));
             case "beta_at_theta_max_deg" -> rounded(ObliqueLimits.angleAtDeflectionMax(mach1, gamma));
             case "beta_weak_deg" -> rounded(weak(mach1, row.number("theta_deg"), gamma));
-            case "beta_strong_deg" ->
-                rounded(ObliqueAngle.shockAngle(mach1, row.number("theta_deg"), gamma, STRONG));
+            case "beta_strong_deg" -> rounded(ObliqueAngle.shockAngle(mach1, row.number("theta_deg"), gamma, STRONG));
             case "p2/p1 weak" ->
                 rounded(ObliqueShock.p2OverP1(mach1, weak(mach1, row.number("theta_deg"), gamma), gamma));
             case "M2 weak" -> rounded(ObliqueShock.mach2(mach1, weak(mach1, row.number("theta_deg"), gamma), gamma));
@@ -61,8 +60,7 @@ class ObliqueShockValidationTest {
     @Test
     void everyObliqueShockOfTheTablesIsMet() {
         PublishedTable table = PublishedTable.read("oblique_cone_expansion.csv");
-        assertEquals(
-                Map.of("checked", 60, "of another family", 68), table.check(ObliqueShockValidationTest::ofTable));
+        assertEquals(Map.of("checked", 60, "of another family", 68), table.check(ObliqueShockValidationTest::ofTable));
     }
 
     private static Answer ofExample(Row row) {
@@ -134,11 +132,16 @@ class ObliqueShockValidationTest {
         }
 
         Dfp p2OverP1() {
-            return gamma.multiply(normal()).multiply(2).subtract(gamma.subtract(1)).divide(gamma.add(1));
+            return gamma.multiply(normal())
+                    .multiply(2)
+                    .subtract(gamma.subtract(1))
+                    .divide(gamma.add(1));
         }
 
         Dfp rho2OverRho1() {
-            return gamma.add(1).multiply(normal()).divide(gamma.subtract(1).multiply(normal()).add(2));
+            return gamma.add(1)
+                    .multiply(normal())
+                    .divide(gamma.subtract(1).multiply(normal()).add(2));
         }
 
         /** Equation (132). */
@@ -146,9 +149,14 @@ class ObliqueShockValidationTest {
             Dfp n = normal();
             Dfp more = gamma.add(1);
             Dfp less = gamma.subtract(1);
-            Dfp top = more.multiply(more).multiply(m).multiply(n).subtract(
-                    n.subtract(1).multiply(gamma.multiply(n).add(1)).multiply(4));
-            Dfp bottom = gamma.multiply(n).multiply(2).subtract(less).multiply(less.multiply(n).add(2));
+            Dfp top = more.multiply(more)
+                    .multiply(m)
+                    .multiply(n)
+                    .subtract(n.subtract(1).multiply(gamma.multiply(n).add(1)).multiply(4));
+            Dfp bottom = gamma.multiply(n)
+                    .multiply(2)
+                    .subtract(less)
+                    .multiply(less.multiply(n).add(2));
             return top.divide(bottom).sqrt();
         }
     }
@@ -215,9 +223,12 @@ class ObliqueShockValidationTest {
     void detachmentHoldsInFortyDigits() {
         SplittableRandom random = new SplittableRandom(168);
         for (int i = 0; i < POINTS; i++) {
-            double gamma = i % 3 == 0 ? 1 + StrictMath.pow(10, -6 + 7.5 * random.nextDouble()) : 1.05 + 0.7 * random.nextDouble();
+            double gamma = i % 3 == 0
+                    ? 1 + StrictMath.pow(10, -6 + 7.5 * random.nextDouble())
+                    : 1.05 + 0.7 * random.nextDouble();
             double limit = ObliqueLimits.deflectionLimit(gamma);
-            double deflection = limit * (i % 2 == 0 ? StrictMath.pow(10, -8 * random.nextDouble()) : random.nextDouble());
+            double deflection =
+                    limit * (i % 2 == 0 ? StrictMath.pow(10, -8 * random.nextDouble()) : random.nextDouble());
             double mach1 = ObliqueLimits.mach1AtDetachment(deflection, gamma);
             double slope = ObliqueSlopes.deflectionMaxByMach1(mach1, gamma);
             Dfp missed = greatestDeflection(mach1, gamma).subtract(FortyDigits.of(deflection));
@@ -231,11 +242,17 @@ class ObliqueShockValidationTest {
         Dfp g = FortyDigits.of(gamma);
         Dfp m = FortyDigits.of(mach1).multiply(FortyDigits.of(mach1));
         Dfp more = g.add(1);
-        Dfp root = more.multiply(m).multiply(m).add(g.subtract(1).multiply(m).multiply(8)).add(16).multiply(more).sqrt();
+        Dfp root = more.multiply(m)
+                .multiply(m)
+                .add(g.subtract(1).multiply(m).multiply(8))
+                .add(16)
+                .multiply(more)
+                .sqrt();
         Dfp sin2 = more.multiply(m).subtract(4).add(root).divide(g.multiply(m).multiply(4));
         Dfp cotangent = sin2.reciprocal().subtract(1).sqrt();
         Dfp bottom = more.subtract(sin2.multiply(2)).multiply(m).add(2);
-        Dfp tangent = cotangent.multiply(2).multiply(m.multiply(sin2).subtract(1)).divide(bottom);
+        Dfp tangent =
+                cotangent.multiply(2).multiply(m.multiply(sin2).subtract(1)).divide(bottom);
         return DfpMath.atan(tangent).multiply(180).divide(FortyDigits.pi());
     }
 }

@@ -106,6 +106,10 @@ final class ArrowsTest {
                 Map.entry("Nozzle", "nozzle"),
                 Map.entry("Thrust", "nozzle"),
                 Map.entry("JetTurn", "nozzle"),
+                Map.entry("Fanno", "fanno"),
+                Map.entry("FrictionFactor", "fanno"),
+                Map.entry("Rayleigh", "rayleigh"),
+                Map.entry("Oblique", "oblique"),
                 Map.entry("Vessel", "vessel"));
 
         @Override
