@@ -154,7 +154,7 @@ final class FlowMeter {
             .title("Discharge coefficient of a critical flow nozzle")
             .formula("Cd = 0.9959 - 2.720 Re^-0.5")
             .note("Toroidal throat, normally machined, 2.1e4 <= Re <= 3.2e7, uncertainty 0.3 %. These coefficients were"
-                    + " read where open programs restate the standard; those of the accurately machined and of the"
+                    + " read in public restatements of the standard; those of the accurately machined and of the"
                     + " cylindrical throat were found in no readable source and are left out. For such nozzles, for"
                     + " another edition of the standard and for a calibrated nozzle give meter_critical_mass_flow its"
                     + " Cd.")

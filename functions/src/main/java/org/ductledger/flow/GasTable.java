@@ -82,7 +82,7 @@ final class GasTable {
     };
 
     /**
-     * NASA TM-4647, as open programs restate it: ln(mu / 1 micropoise) = A ln T + B/T + C/T^2 + D; for air Sutherland's
+     * NASA TM-4647, as public restatements have it: ln(mu / 1 micropoise) = A ln T + B/T + C/T^2 + D; for air Sutherland's
      * beta and S.
      */
     static final double[][][] VISCOSITY = {

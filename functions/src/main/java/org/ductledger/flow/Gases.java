@@ -187,8 +187,8 @@ final class Gases {
                             .note("Of the dilute gas, without the effect of pressure. Air by Sutherland's equation with"
                                     + " the constants of the U.S. Standard Atmosphere, beta = 1.458e-6 kg/(s m K^0.5)"
                                     + " and S = 110.4 K, taken for 100 to 1900 K (common practice after NACA Report"
-                                    + " 1135, from memory). The coefficients of the other gases were read where open"
-                                    + " programs restate the report; they agree with reference correlations within 1 %"
+                                    + " 1135, from memory). The coefficients of the other gases were read in public"
+                                    + " restatements of the report; they agree with reference correlations within 1 %"
                                     + " near 300 K. Carbon monoxide has nitrogen's fit.")
                             .takes(GAS, T)
                             .gives("mu", "Pa.s", Interval.above(0))

@@ -86,7 +86,7 @@ class FlowMeterValidationTest {
         return first.multiply(second).multiply(work).sqrt();
     }
 
-    /** ISO 9300:2005 as restated in open programs: Cd = 0.9959 - 2.720 Re^-0.5 for 2.1e4 <= Re <= 3.2e7. */
+    /** ISO 9300:2005 as public restatements have it: Cd = 0.9959 - 2.720 Re^-0.5 for 2.1e4 <= Re <= 3.2e7. */
     @Test
     void theDischargeCoefficientIsThatOfTheStandard() {
         assertEquals(0.9959 - 0.00272, FlowMeter.dischargeCoefficient(1e6, TOROIDAL_NORMAL), 1e-15);
